@@ -1,0 +1,83 @@
+import { readdir, readFile, writeFile } from 'node:fs/promises'
+import { extname, join } from 'node:path'
+import { fileURLToPath } from 'node:url'
+import { promisify } from 'node:util'
+import { brotliCompress, constants, gzip } from 'node:zlib'
+import { quasar, transformAssetUrls } from '@quasar/vite-plugin'
+import vue from '@vitejs/plugin-vue'
+import type { Plugin } from 'vite'
+import { defineConfig } from 'vitest/config'
+
+const clientFolder = 'dist/client'
+const compressedKinds = new Set(['.js', '.css', '.html', '.svg', '.json', '.vtt'])
+const smallestCompressedBytes = 1024
+
+/** Writes a .br and a .gz file beside every text asset, so that the server compresses nothing. */
+function precompress(folder: string): Plugin {
+  return {
+    name: 'precompress',
+    apply: (_config, { command, isSsrBuild }) => command === 'build' && !isSsrBuild,
+    async closeBundle(error) {
+      if (error) return
+      const entries = await readdir(folder, { recursive: true, withFileTypes: true })
+      for (const entry of entries) {
+        if (!entry.isFile() || !compressedKinds.has(extname(entry.name))) continue
+        const path = join(entry.parentPath, entry.name)
+        const content = await readFile(path)
+        if (content.length < smallestCompressedBytes) continue
+        const params = { [constants.BROTLI_PARAM_SIZE_HINT]: content.length }
+        await writeFile(`${path}.br`, await promisify(brotliCompress)(content, { params }))
+        await writeFile(`${path}.gz`, await promisify(gzip)(content, { level: 9 }))
+      }
+    },
+  }
+}
+
+export default defineConfig(({ isSsrBuild }) => ({
+  plugins: [
+    vue({ template: { transformAssetUrls } }),
+    quasar({
+      sassVariables: fileURLToPath(new URL('src/css/quasar-variables.sass', import.meta.url)),
+    }),
+    precompress(clientFolder),
+  ],
+  publicDir: false,
+  build: {
+    outDir: clientFolder,
+    emptyOutDir: true,
+    assetsInlineLimit: 0,
+    manifest: !isSsrBuild,
+    modulePreload: { polyfill: false },
+    reportCompressedSize: false,
+    ...(isSsrBuild ? { target: 'node20', sourcemap: true } : {}),
+  },
+  test: {
+    restoreMocks: true,
+    unstubGlobals: true,
+    projects: [
+      {
+        test: { name: 'shared', environment: 'node', include: ['tests/shared/**/*.test.ts'] },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'client',
+          environment: 'happy-dom',
+          include: ['tests/src/**/*.test.ts'],
+          server: { deps: { inline: ['quasar'] } },
+        },
+      },
+      {
+        test: {
+          name: 'server',
+          environment: 'node',
+          include: ['tests/server/**/*.test.ts'],
+          globalSetup: ['tests/support/globalSetup.ts'],
+          fileParallelism: false,
+          testTimeout: 20_000,
+          hookTimeout: 60_000,
+        },
+      },
+    ],
+  },
+}))
