@@ -1,0 +1,7 @@
+export * from './accounts'
+export * from './builds'
+export * from './courses'
+export * from './exercises'
+export * from './fence'
+export * from './media'
+export * from './progress'
