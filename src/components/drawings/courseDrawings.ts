@@ -1,0 +1,17 @@
+import { defineAsyncComponent, h, type Component } from 'vue'
+
+/** Holds the drawing's room while its code is on the way. */
+const DrawingWaits = () => h('div', { style: 'min-height: 236px' })
+
+function load(loader: () => Promise<{ default: Component }>): Component {
+  return defineAsyncComponent({ loader, loadingComponent: DrawingWaits, delay: 0 })
+}
+
+/** Every kind of course drawing; each is fetched when it is first shown. */
+export const COURSE_DRAWINGS = {
+  'log-store': load(() => import('./LogStoreDrawing.vue')),
+  deck: load(() => import('./DeckDrawing.vue')),
+  'picket-fence': load(() => import('./PicketFenceDrawing.vue')),
+} as const satisfies Record<string, Component>
+
+export type CourseDrawingType = keyof typeof COURSE_DRAWINGS
