@@ -138,7 +138,10 @@ const clientZones = [
   },
 ]
 
-const drizzlePackages = { regex: '^(drizzle-orm|mysql2)(/|$)', message: 'Only queries and db/ do.' }
+const drizzlePackages = {
+  regex: '^(drizzle-orm|mysql2)(/|$)',
+  message: 'Only queries and db/ speak to the database.',
+}
 const webPackages = {
   regex: '^(express|express-.*|helmet|socket\\.io)(/|$)',
   message: 'Only routes, sockets and middleware know how the server is called.',
@@ -261,8 +264,8 @@ export default defineConfig(
   },
   {
     files: ['src/**/*.vue'],
-    extends: [tseslint.configs.disableTypeChecked],
     rules: {
+      ...tseslint.configs.disableTypeChecked.rules,
       '@typescript-eslint/no-floating-promises': 'error',
       '@typescript-eslint/await-thenable': 'error',
       'vue/block-lang': ['error', { script: { lang: 'ts' } }],
@@ -320,6 +323,15 @@ export default defineConfig(
   {
     files: ['server/**/*.ts'],
     rules: { 'no-restricted-imports': ['error', { patterns: [drizzlePackages] }] },
+  },
+  {
+    files: ['server/cli/**/*.ts'],
+    rules: {
+      'no-restricted-imports': [
+        'error',
+        { patterns: [{ ...drizzlePackages, regex: '^drizzle-orm(/|$)' }] },
+      ],
+    },
   },
   {
     files: ['server/**/*.service.ts'],

@@ -73,6 +73,7 @@ export default defineConfig(({ isSsrBuild }) => ({
           environment: 'node',
           include: ['tests/server/**/*.test.ts'],
           globalSetup: ['tests/support/globalSetup.ts'],
+          setupFiles: ['tests/support/serverSetup.ts'],
           fileParallelism: false,
           testTimeout: 20_000,
           hookTimeout: 60_000,

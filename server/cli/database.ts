@@ -10,6 +10,13 @@ import { findFreePort, isPortFree, isProcessAlive, runProgram, waitUntil } from 
 
 const host = '127.0.0.1'
 const user = 'good_footing'
+const withoutDiskFlushes = [
+  '--debug-no-sync',
+  '--sync-frm=OFF',
+  '--innodb-flush-method=nosync',
+  '--innodb-doublewrite=OFF',
+  '--innodb-file-per-table=OFF',
+]
 const startTimeoutMs = 120_000
 const stopTimeoutMs = 60_000
 
@@ -19,6 +26,8 @@ export interface DatabaseOptions {
   database: string
   /** Lets the user make further databases, as tests do. */
   mayCreateDatabases?: boolean
+  /** Spares the disk: a crash of the machine may then lose data. For tests. */
+  isThrowaway?: boolean
 }
 
 export interface PrivateDatabase {
@@ -58,7 +67,7 @@ export async function startDatabase(options: DatabaseOptions): Promise<PrivateDa
     return startDatabase(options)
   }
   await writeInitFile(folder, settings, options)
-  const processId = await spawnServer(folder, settings.port)
+  const processId = await spawnServer(folder, settings.port, options.isThrowaway ?? false)
   await waitForAnswer(url, folder, () => isOurs(folder, processId))
   return describeRunning(folder, url, processId, false)
 }
@@ -142,7 +151,7 @@ async function writeInitFile(
   await writeFile(join(folder, 'init.sql'), lines, { mode: 0o600 })
 }
 
-async function spawnServer(folder: string, port: number): Promise<number> {
+async function spawnServer(folder: string, port: number, isThrowaway: boolean): Promise<number> {
   const child = spawn(
     findProgram('mariadbd'),
     [
@@ -161,6 +170,7 @@ async function spawnServer(folder: string, port: number): Promise<number> {
       '--default-time-zone=+00:00',
       '--innodb-flush-log-at-trx-commit=1',
       '--skip-name-resolve',
+      ...(isThrowaway ? withoutDiskFlushes : []),
     ],
     // A group of its own: Ctrl-C reaches the server first, and the database when nobody needs it.
     { detached: true, stdio: 'ignore' },

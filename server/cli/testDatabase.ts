@@ -1,4 +1,4 @@
-import { mkdir, mkdtemp, readdir, rm, writeFile, readFile } from 'node:fs/promises'
+import { mkdir, mkdtemp, readdir, readFile, rm, statfs, writeFile } from 'node:fs/promises'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { startDatabase } from './database'
@@ -6,6 +6,9 @@ import { isProcessAlive } from './processes'
 
 const prefix = 'good-footing-test-'
 const ownerFile = 'owner'
+/** A disk in memory makes a test's tables four times as fast. */
+const memoryFolder = '/dev/shm'
+const memoryWantedBytes = 1024 ** 3
 
 export interface TestDatabase {
   /** Ends with the name of an empty database; its user may make further ones. */
@@ -17,8 +20,9 @@ export interface TestDatabase {
 
 /** A MariaDB in a temporary folder, with nothing in common with the one that people use. */
 export async function startTestDatabase(): Promise<TestDatabase> {
-  await clearAbandoned()
-  const folder = await mkdtemp(join(tmpdir(), prefix))
+  const parent = (await hasMemoryFolder()) ? memoryFolder : tmpdir()
+  await clearAbandoned(parent)
+  const folder = await mkdtemp(join(parent, prefix))
   await writeFile(join(folder, ownerFile), String(process.pid))
   const dataFolder = join(folder, 'files')
   await mkdir(dataFolder)
@@ -26,6 +30,7 @@ export async function startTestDatabase(): Promise<TestDatabase> {
     folder: join(folder, 'mariadb'),
     database: 'gf_test',
     mayCreateDatabases: true,
+    isThrowaway: true,
   })
   return {
     url: database.url,
@@ -38,10 +43,10 @@ export async function startTestDatabase(): Promise<TestDatabase> {
 }
 
 /** Ends and removes what a killed test run has left behind. */
-async function clearAbandoned(): Promise<void> {
-  for (const name of await readdir(tmpdir())) {
+async function clearAbandoned(parent: string): Promise<void> {
+  for (const name of await readdir(parent)) {
     if (!name.startsWith(prefix)) continue
-    const folder = join(tmpdir(), name)
+    const folder = join(parent, name)
     const owner = Number(await readFile(join(folder, ownerFile), 'utf8').catch(() => '0'))
     if (owner === 0 || isProcessAlive(owner, 'node')) continue
     const file = join(folder, 'mariadb', 'mariadb.pid')
@@ -49,4 +54,9 @@ async function clearAbandoned(): Promise<void> {
     if (processId > 0 && isProcessAlive(processId, folder)) process.kill(processId, 'SIGKILL')
     await rm(folder, { recursive: true, force: true })
   }
+}
+
+async function hasMemoryFolder(): Promise<boolean> {
+  const room = await statfs(memoryFolder).catch(() => null)
+  return room !== null && room.bavail * room.bsize >= memoryWantedBytes
 }
