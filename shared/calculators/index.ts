@@ -1,0 +1,17 @@
+import type { Calculator } from './calculator'
+import { diagonals } from './diagonals'
+import { mix } from './mix'
+import { pitch } from './pitch'
+import { slab } from './slab'
+import { square } from './square'
+
+/** Every calculator there is; a new one is one file and one line here. */
+export const calculators: readonly Calculator[] = [slab, mix, square, diagonals, pitch]
+
+/** The calculator of this id. */
+export const findCalculator = (id: string): Calculator | undefined =>
+  calculators.find((calculator) => calculator.id === id)
+
+export { convertText, fieldUnit, showInput, showOutput } from './fields'
+export { readInputs, type InputErrors } from './readInputs'
+export { hideAnswer, runCalculator, type CalculatorRun } from './runCalculator'
