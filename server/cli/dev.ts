@@ -13,6 +13,7 @@ async function develop(): Promise<number> {
     throw new Error(`Port ${port} is taken by another program. Stop it, or set PORT to a free one.`)
   }
   await prepareDatabase(console.log)
+  const signIns = await describeSignIns()
   const child = spawn(
     process.execPath,
     ['node_modules/tsx/dist/cli.mjs', 'watch', '--clear-screen=false', 'server/index.ts'],
@@ -20,7 +21,7 @@ async function develop(): Promise<number> {
   )
   whenStopping(() => endChild(child, 10_000))
   void waitUntil(async () => !(await isPortFree(port)), firstAnswerMs, 500).then((isOpen) => {
-    if (isOpen) console.log(`\nhttp://localhost:${port}\n\n${describeSignIns()}`)
+    if (isOpen) console.log(`\nhttp://localhost:${port}\n\n${signIns}`)
   })
   return new Promise((resolve) => {
     child.once('exit', (code) => resolve(code ?? 1))

@@ -1,5 +1,5 @@
 import { join } from 'node:path'
-import { setInterval } from 'node:timers/promises'
+import { setTimeout as wait } from 'node:timers/promises'
 import { migrateDatabase } from '../db/migrate'
 import { startDatabase, type PrivateDatabase } from './database'
 import { dataFolder, openDatabase, privateDatabase } from './openDatabase'
@@ -48,9 +48,9 @@ async function watchOver(first: PrivateDatabase, say: Say): Promise<void> {
   let database = first
   let restarts = 0
   whenStopping(() => database.stop())
-  for await (const _tick of setInterval(checkEveryMs, undefined, { ref: false })) {
-    if (isStopping()) return
-    if (database.isRunning()) continue
+  while (!isStopping()) {
+    await wait(checkEveryMs, undefined, { ref: false })
+    if (isStopping() || database.isRunning()) continue
     restarts += 1
     if (restarts > mostRestarts) {
       say('The database ended again and again; see mariadb.log in its folder.')

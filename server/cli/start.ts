@@ -22,6 +22,7 @@ async function start(): Promise<number> {
 
 /** Runs the built server until it ends; answers with its exit code. */
 async function serve(port: number): Promise<number> {
+  const signIns = await describeSignIns()
   const child = spawn(process.execPath, ['--enable-source-maps', 'dist/server/index.js'], {
     stdio: ['inherit', 'inherit', 'inherit', 'ipc'],
     env: { ...process.env, NODE_ENV: 'production', LOG_LEVEL: process.env['LOG_LEVEL'] ?? 'warn' },
@@ -29,8 +30,7 @@ async function serve(port: number): Promise<number> {
   whenStopping(() => endChild(child, serverStopMs))
   child.on('message', (message) => {
     if (message !== 'listening') return
-    console.log(`\nGood Footing is open at http://localhost:${port}\n`)
-    console.log(describeSignIns())
+    console.log(`\nGood Footing is open at http://localhost:${port}\n\n${signIns}`)
     console.log('Ctrl-C stops it.')
   })
   return new Promise((resolve, reject) => {

@@ -20,7 +20,7 @@ export interface TestDatabase {
 
 /** A MariaDB in a temporary folder, with nothing in common with the one that people use. */
 export async function startTestDatabase(): Promise<TestDatabase> {
-  const parent = (await hasMemoryFolder()) ? memoryFolder : tmpdir()
+  const parent = await chooseTestParent()
   await clearAbandoned(parent)
   const folder = await mkdtemp(join(parent, prefix))
   await writeFile(join(folder, ownerFile), String(process.pid))
@@ -56,7 +56,9 @@ async function clearAbandoned(parent: string): Promise<void> {
   }
 }
 
-async function hasMemoryFolder(): Promise<boolean> {
+/** Where test databases lie: in memory where there is room for them, else in the temporary folder. */
+export async function chooseTestParent(): Promise<string> {
   const room = await statfs(memoryFolder).catch(() => null)
-  return room !== null && room.bavail * room.bsize >= memoryWantedBytes
+  const isRoomy = room !== null && room.bavail * room.bsize >= memoryWantedBytes
+  return isRoomy ? memoryFolder : tmpdir()
 }
