@@ -1,0 +1,28 @@
+/** A moment of a video as minutes and seconds: 380 000 ms is `6:20`. */
+export function formatMoment(ms: number): string {
+  const seconds = Math.floor(ms / 1000)
+  const hours = Math.floor(seconds / 3600)
+  const minutes = Math.floor((seconds % 3600) / 60)
+  const rest = String(seconds % 60).padStart(2, '0')
+  return hours ? `${hours}:${String(minutes).padStart(2, '0')}:${rest}` : `${minutes}:${rest}`
+}
+
+/** How long things last in words: `37 min`, `3 h 29 min`. */
+export function formatDuration(ms: number): string {
+  const minutes = Math.max(1, Math.round(ms / 60_000))
+  return minutes < 60 ? `${minutes} min` : `${Math.floor(minutes / 60)} h ${minutes % 60} min`
+}
+
+/** A day in the person's own zone: `12 May`, with the year when it is not this one. */
+export function formatDay(iso: string): string {
+  const date = new Date(iso)
+  const isThisYear = date.getFullYear() === new Date().getFullYear()
+  return date.toLocaleDateString('en-GB', {
+    day: 'numeric',
+    month: 'long',
+    ...(isThisYear ? {} : { year: 'numeric' }),
+  })
+}
+
+/** A number of things in words: `1 lesson`, `3 lessons`. */
+export const countOf = (n: number, one: string, many = `${one}s`) => `${n} ${n === 1 ? one : many}`

@@ -1,0 +1,17 @@
+import '@fontsource/nunito/latin-500.css'
+import '@fontsource/nunito/latin-600.css'
+import '@fontsource/nunito/latin-700.css'
+import '@fontsource/nunito/latin-800.css'
+import '@fontsource/nunito/latin-900.css'
+import './css/app.sass'
+import './css/tokens.css'
+import './css/base.css'
+import './css/pieces.css'
+import './css/drawings.css'
+import { createPinia } from 'pinia'
+import { Quasar } from 'quasar'
+import { createApp } from 'vue'
+import App from './App.vue'
+import { router } from './router'
+
+createApp(App).use(createPinia()).use(Quasar, {}).use(router).mount('#app')

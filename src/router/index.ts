@@ -1,0 +1,33 @@
+import { nextTick } from 'vue'
+import { createRouter, createWebHistory } from 'vue-router'
+import { useAccountsStore } from '../stores/accounts'
+import { guardSignedIn } from './guards'
+import { routes } from './routes'
+
+declare module 'vue-router' {
+  interface RouteMeta {
+    /** The page's name in the window's title. */
+    title?: string
+    needsSignIn?: boolean
+  }
+}
+
+export const router = createRouter({
+  history: createWebHistory(),
+  routes,
+  scrollBehavior: (to, from, saved) => saved ?? (to.path === from.path ? undefined : { top: 0 }),
+})
+
+router.beforeEach(async (to) => {
+  await useAccountsStore().load()
+  return guardSignedIn(to)
+})
+
+router.afterEach(async (to, from, failure) => {
+  if (failure) return
+  document.title = to.meta.title ? `${to.meta.title} · Good Footing` : 'Good Footing'
+  if (from.matched.length > 0 && to.path !== from.path) {
+    await nextTick()
+    document.querySelector<HTMLElement>('#main')?.focus({ preventScroll: true })
+  }
+})
