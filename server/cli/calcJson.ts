@@ -89,8 +89,8 @@ export function computeInputs(
 ): CalcSuccess | CalcFailure {
   const read = readJson(calculator, given)
   if ('error' in read) return read
-  const metric = computeValues(calculator, read, 'metric')
-  const imperial = computeValues(calculator, read, 'imperial')
+  const metric = computeValues(calculator, read.values, 'metric')
+  const imperial = computeValues(calculator, read.values, 'imperial')
   const failed = metric.ok ? imperial : metric
   if (!metric.ok || !imperial.ok) {
     const [input = '', message = ''] = failed.ok ? [] : (Object.entries(failed.errors)[0] ?? [])
@@ -114,7 +114,10 @@ export function computeInputs(
 }
 
 /** Texts go the way of the browser's fields, plain numbers are in JSON units and meet the same bounds. */
-function readJson(calculator: Calculator, given: Record<string, unknown>): Values | CalcFailure {
+function readJson(
+  calculator: Calculator,
+  given: Record<string, unknown>,
+): { values: Values } | CalcFailure {
   const texts: Record<string, string> = {}
   const numbers: Values = {}
   for (const [name, value] of Object.entries(given)) {
@@ -137,7 +140,7 @@ function readJson(calculator: Calculator, given: Record<string, unknown>): Value
   }
   const { values, errors } = readInputs(calculator, texts, 'metric')
   const error = Object.entries(errors).find(([name]) => numbers[name] === undefined)
-  return error ? failure(error[0], error[1]) : { ...values, ...numbers }
+  return error ? failure(error[0], error[1]) : { values: { ...values, ...numbers } }
 }
 
 /** What `list` prints of a calculator: its inputs and outputs with the units of plain numbers and the bounds. */

@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process'
 import { buildWhenChanged } from './build'
 import { prepareDatabase } from './prepareDatabase'
 import { endChild, isPortFree } from './processes'
-import { runToEnd, stopOnSignals, whenStopping } from './shutdown'
+import { isStopping, runToEnd, stopOnSignals, whenStopping } from './shutdown'
 import { describeSignIns } from './signIns'
 
 const serverStopMs = 10_000
@@ -35,7 +35,10 @@ async function serve(port: number): Promise<number> {
   })
   return new Promise((resolve, reject) => {
     child.once('error', reject)
-    child.once('exit', (code) => resolve(code ?? 1))
+    child.once('exit', (code) => {
+      if (!isStopping()) console.error('The server has ended; stopping the rest. Start it again.')
+      resolve(code ?? 1)
+    })
   })
 }
 
