@@ -154,7 +154,7 @@ export const diagonals: Calculator = {
     outputs: {
       expected: 2.82312,
       difference: 0.006,
-      cornerError: 0.00296116,
+      cornerError: 0.00296119,
       moveBy: 0.00325731,
       square: 'no',
       longer: 'first',

@@ -1,0 +1,163 @@
+import type { Calculator, CalculatorOutput, Slip, Value, Values } from '../calculators/calculator'
+import {
+  convertText,
+  fieldUnit,
+  findCalculator,
+  runCalculator,
+  showOutput,
+} from '../calculators/index'
+import type {
+  Answer,
+  CalculatorDefinition,
+  Exercise,
+  UnitSystem,
+  Verdict,
+} from '../contracts/exercises'
+import { parseQuantity } from '../units/parse'
+import { drawInputs } from './drawInputs'
+import { isWithin } from './tolerance'
+import { unreadVerdict } from './verdict'
+
+export type CalculatorExercise = Extract<Exercise, { kind: 'calculator' }>
+type CalculatorAnswer = Extract<Answer, { kind: 'calculator' }>
+
+/** The texts a learner works with: given ones drawn from the seed, own ones as they typed them. */
+export function learnerTexts(
+  definition: CalculatorDefinition,
+  calculator: Calculator,
+  seed: number,
+  own: Record<string, string>,
+  system: UnitSystem,
+): Record<string, string> {
+  const texts = drawInputs(definition, calculator, seed, system)
+  for (const [name, given] of Object.entries(definition.inputs)) {
+    const typed = own[name]
+    if (given.mode === 'own' && typed !== undefined) texts[name] = typed
+  }
+  return texts
+}
+
+/** Grades an answer by the calculator itself; a wrong one is compared with the slips this stop names. */
+export function gradeCalculator(
+  exercise: CalculatorExercise,
+  answer: CalculatorAnswer,
+  seed: number,
+): Verdict {
+  const { definition } = exercise
+  const calculator = findCalculator(definition.calculator)
+  const output = calculator?.outputs.find(({ name }) => name === definition.asked)
+  if (!calculator || !output)
+    return unreadVerdict('This stop asks for something that does not exist.', 'answer')
+  const texts = learnerTexts(definition, calculator, seed, answer.inputs, answer.units)
+  const run = runCalculator(calculator, texts, answer.units)
+  if (!run.ok) {
+    const [field = 'answer', message = ''] = Object.entries(run.errors)[0] ?? []
+    return unreadVerdict(message, field)
+  }
+  const right = run.outputs[output.name]
+  if (right === undefined) {
+    return unreadVerdict(
+      `With these inputs there is no ${output.label.toLowerCase()} to work out.`,
+      'answer',
+    )
+  }
+  const read = readAnswer(output, answer.answer, answer.units)
+  if (!read.ok) return unreadVerdict(read.message, 'answer')
+  if (matches(read.value, right, definition)) return rightVerdict(answer.answer)
+  const slip = findSlip(calculator, definition, run, read.value, answer.units)
+  return slip ? slipVerdict(slip) : wrongVerdict(answer.answer)
+}
+
+type ReadAnswer = { ok: true; value: number | string } | { ok: false; message: string }
+
+/** An answer as a value of the asked output; a bare number takes the unit its field shows. */
+export function readAnswer(output: CalculatorOutput, text: string, system: UnitSystem): ReadAnswer {
+  if (output.quantity !== 'choice') {
+    return parseQuantity(text, output.quantity, { system, defaultUnit: fieldUnit(output, system) })
+  }
+  const wanted = text.trim().toLowerCase()
+  const choice = output.choices?.find(
+    ({ value, label }) => value.toLowerCase() === wanted || label.toLowerCase() === wanted,
+  )
+  if (choice) return { ok: true, value: choice.value }
+  return { ok: false, message: 'Pick one of the choices.' }
+}
+
+function matches(value: Value, right: Value, { tolerance }: CalculatorDefinition): boolean {
+  if (typeof value === 'number' && typeof right === 'number')
+    return isWithin(value, right, tolerance)
+  return value === right
+}
+
+/** The named slip whose wrong value is nearest to the answer and within the tolerance; never one that gives the right value. */
+function findSlip(
+  calculator: Calculator,
+  definition: CalculatorDefinition,
+  run: { values: Values; outputs: Values },
+  value: number | string,
+  system: UnitSystem,
+): Slip | undefined {
+  const right = run.outputs[definition.asked]
+  const found = namedSlips(calculator, definition).flatMap((slip) => {
+    const wrong = slip.wrong(run.values, run.outputs, system)
+    if (wrong === undefined || right === undefined) return []
+    if (matches(wrong, right, definition) || !matches(value, wrong, definition)) return []
+    const distance = typeof wrong === 'number' ? Math.abs(Number(value) - wrong) : 0
+    return [{ slip, distance }]
+  })
+  return found.sort((a, b) => a.distance - b.distance)[0]?.slip
+}
+
+/** The slips of the asked output that this stop names. */
+export const namedSlips = (
+  calculator: Calculator,
+  { slips, asked }: CalculatorDefinition,
+): Slip[] => calculator.slips.filter(({ id, output }) => output === asked && slips.includes(id))
+
+const verdict = (outcome: Verdict['outcome'], message: string, wayBack: string): Verdict => ({
+  right: outcome === 'right',
+  outcome,
+  slip: null,
+  message,
+  wayBack,
+  field: null,
+  questions: {},
+})
+const rightVerdict = (typed: string) =>
+  verdict('right', `${typed.trim()} is right.`, 'Put it in your field book, or carry on.')
+const slipVerdict = (slip: Slip): Verdict => ({
+  ...verdict('slip', slip.sentence, slip.wayBack),
+  slip: { id: slip.id, title: slip.title },
+})
+const wrongVerdict = (typed: string) =>
+  verdict(
+    'wrong',
+    `${typed.trim()} does not fit.`,
+    'Go through the worked steps again with your own numbers.',
+  )
+
+/** The learner's own inputs, and the system whose units a bare number of theirs has. */
+export interface OwnTexts {
+  texts: Record<string, string>
+  system: UnitSystem
+}
+
+/** The right answer as text in a person's system; empty where the inputs cannot be computed. */
+export function showCalculatorAnswer(
+  { definition }: CalculatorExercise,
+  seed: number,
+  own: OwnTexts,
+  system: UnitSystem,
+): string {
+  const calculator = findCalculator(definition.calculator)
+  const output = calculator?.outputs.find(({ name }) => name === definition.asked)
+  if (!calculator || !output) return ''
+  const converted = calculator.inputs.flatMap((input) => {
+    const typed = own.texts[input.name]
+    return typed === undefined ? [] : [[input.name, convertText(input, typed, own.system, system)]]
+  })
+  const ownTexts = Object.fromEntries(converted) as Record<string, string>
+  const texts = learnerTexts(definition, calculator, seed, ownTexts, system)
+  const run = runCalculator(calculator, texts, system)
+  return run.ok ? showOutput(output, run.outputs[output.name], system) : ''
+}

@@ -1,0 +1,96 @@
+import { findCalculator } from '../calculators/index'
+import type { Answer, Exercise, LearnerExercise, UnitSystem, Verdict } from '../contracts/exercises'
+import { gradeCalculator, showCalculatorAnswer } from './calculatorExercise'
+import { findCalculatorProblems } from './calculatorProblems'
+import { drawInputs } from './drawInputs'
+import type { ExerciseProblem } from './grader'
+import { toLearnerQuestion } from './questions'
+import { findQuizProblems, gradeQuiz, showQuizAnswer } from './quizExercise'
+import { unreadVerdict } from './verdict'
+
+export type { ExerciseProblem } from './grader'
+export { drawInputs }
+
+/**
+ * An exercise as one learner sees it: own numbers of their seed, the hints they have earned, no right answer.
+ * Numbers are in units of `system`; a client that changes units converts them with `convertText`.
+ */
+export function toLearnerExercise(
+  exercise: Exercise,
+  seed: number,
+  triesUsed: number,
+  solved: boolean,
+  system: UnitSystem = 'metric',
+): LearnerExercise {
+  const { prompt, tries } = exercise
+  if (exercise.kind === 'quiz') {
+    const { kind, passMark, questions } = exercise
+    const shown = questions.map((question) => toLearnerQuestion(question, seed))
+    return { kind, prompt, tries, passMark, questions: shown }
+  }
+  const { calculator: id, asked, hints, inputs } = exercise.definition
+  const calculator = findCalculator(id)
+  const texts = calculator ? drawInputs(exercise.definition, calculator, seed, system) : {}
+  const given = Object.entries(texts).map(([name, value]) => {
+    const mode = inputs[name]?.mode === 'own' ? ('own' as const) : ('given' as const)
+    return [name, { mode, value }]
+  })
+  return {
+    kind: exercise.kind,
+    prompt,
+    tries,
+    calculator: id,
+    asked,
+    inputs: Object.fromEntries(given) as Record<string, { mode: 'given' | 'own'; value: string }>,
+    hints: solved ? hints : hints.slice(0, triesUsed),
+  }
+}
+
+/**
+ * The verdict on an answer; its text never holds the right number. `unread` (with its field) costs no try.
+ */
+export function gradeExercise(exercise: Exercise, answer: Answer, seed: number): Verdict {
+  if (exercise.kind === 'calculator' && answer.kind === 'calculator') {
+    return gradeCalculator(exercise, answer, seed)
+  }
+  if (exercise.kind === 'quiz' && answer.kind === 'quiz') return gradeQuiz(exercise, answer)
+  return unreadVerdict(
+    'This answer belongs to another kind of stop. Load the lesson again.',
+    'answer',
+  )
+}
+
+/**
+ * The right answer as text in both systems, for a stop that is solved or out of tries.
+ * `answer` is the learner's last one: its own inputs decide the numbers.
+ */
+export function shownAnswer(
+  exercise: Exercise,
+  seed: number,
+  answer: Answer | null,
+): Record<UnitSystem, string> {
+  if (exercise.kind === 'quiz') {
+    return {
+      metric: showQuizAnswer(exercise, 'metric'),
+      imperial: showQuizAnswer(exercise, 'imperial'),
+    }
+  }
+  const own = answer?.kind === 'calculator' ? answer.inputs : {}
+  const typedIn = answer?.kind === 'calculator' ? answer.units : 'metric'
+  const show = (system: UnitSystem) =>
+    showCalculatorAnswer(exercise, seed, { texts: own, system: typedIn }, system)
+  return { metric: show('metric'), imperial: show('imperial') }
+}
+
+/** What keeps an exercise from being issued (`blocking`), and what is worth mending; `path` says where. */
+export function findExerciseProblems(exercise: Exercise): ExerciseProblem[] {
+  const found =
+    exercise.kind === 'quiz' ? findQuizProblems(exercise) : findCalculatorProblems(exercise)
+  if (exercise.prompt.trim() !== '') return found
+  const empty = {
+    path: 'prompt',
+    message: 'Nothing is asked: the prompt is empty.',
+    blocking: true,
+  }
+  return [empty, ...found]
+}
