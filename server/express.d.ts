@@ -15,6 +15,11 @@ declare module 'express-session' {
     /** When this session was signed in, in ms; decides the absolute limit. */
     signedInAt: number
     /** A visitor's tries at the stops of sample lessons, and staff's in a preview. */
-    samples: Record<string, { seed: number; triesUsed: number; solved: boolean }>
+    samples: Record<
+      string,
+      { seed: number; triesUsed: number; solved: boolean; answeredKey?: string }
+    >
+    /** Their ticked kit items, by lesson. */
+    kit: Record<string, string[]>
   }
 }

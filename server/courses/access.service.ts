@@ -1,4 +1,4 @@
-import type { Actor, Thing } from '../../shared/contracts/policies'
+import { can, type Actor, type Thing } from '../../shared/contracts/policies'
 import { notFound } from '../errors'
 import {
   findCourse,
@@ -18,6 +18,8 @@ export interface CourseAccess {
   course: CourseRow
   thing: Thing
   enrolment: { id: number; revisionId: number } | null
+  /** Staff of the course, and admins. */
+  mayReadDraft: boolean
 }
 
 /** How `actor` stands to a course; 404 when there is none. */
@@ -28,14 +30,16 @@ export async function accessCourse(
   const course = await findCourse(which)
   if (!course) throw notFound('course')
   const ties = actor ? await findTies(course.id, actor.id) : { staffRole: null, enrolment: null }
+  const thing: Thing = {
+    courseState: course.state,
+    staffRole: ties.staffRole,
+    isEnrolled: ties.enrolment !== null,
+  }
   return {
     course,
     enrolment: ties.enrolment,
-    thing: {
-      courseState: course.state,
-      staffRole: ties.staffRole,
-      isEnrolled: ties.enrolment !== null,
-    },
+    thing,
+    mayReadDraft: can(actor, 'course:see-bench', thing),
   }
 }
 
@@ -44,13 +48,13 @@ export async function revisionFor(
   access: CourseAccess,
   wantsDraft = false,
 ): Promise<RevisionRow | null> {
-  const isStaff = access.thing.staffRole != null
-  if (wantsDraft && isStaff) {
+  if (wantsDraft && access.mayReadDraft) {
     const draft = await findDraftRevision(access.course.id)
     if (draft) return draft
   }
   if (access.enrolment) return findRevision(access.enrolment.revisionId)
-  return (await findIssuedRevision(access.course.id)) ?? (isStaff ? findDraftRevision(access.course.id) : null)
+  const issued = await findIssuedRevision(access.course.id)
+  return issued ?? (access.mayReadDraft ? findDraftRevision(access.course.id) : null)
 }
 
 export interface LessonAccess extends CourseAccess {
@@ -73,6 +77,15 @@ export async function accessLesson(
     lesson,
     thing: { ...access.thing, isSample: lesson.isSample, isIssued: revision.issuedAt !== null },
   }
+}
+
+/**
+ * The person whose ticks, tries and progress in this lesson are kept as rows; null for everyone
+ * else (visitors, staff, previews of a draft), whose ticks and tries live as long as their session.
+ */
+export function recordKeeper(access: LessonAccess, actor: Actor | null): number | null {
+  const keeps = access.thing.isIssued && can(actor, 'lesson:keep-progress', access.thing)
+  return keeps && actor ? actor.id : null
 }
 
 /** How `actor` stands to the course behind a row of the bench; 404 when there is no such row. */

@@ -1,0 +1,41 @@
+import type { Actor } from '../../shared/contracts/policies'
+import type { KitState, LessonProgress, ReportProgress } from '../../shared/contracts/progress'
+import { recordKeeper, type LessonAccess } from '../courses/access.service'
+import { notAllowed } from '../errors'
+import { kitNameOf, tickKit } from './kitChecks.service'
+import { reportProgress } from './lessonProgress.service'
+
+/** Lessons whose ticks one session remembers; the oldest are forgotten beyond it. */
+const maxRemembered = 60
+
+/** Ticks rows of a lesson's kit check: kept for the enrolled, remembered by the session for all others. */
+export async function tickLessonKit(
+  access: LessonAccess,
+  actor: Actor | null,
+  ticked: string[],
+  remembered: Record<string, string[]>,
+): Promise<KitState> {
+  const { id } = access.lesson
+  const name = kitNameOf(id)
+  const userId = recordKeeper(access, actor)
+  const state = await tickKit(id, userId, remembered[name] ?? [], ticked)
+  if (userId === null) {
+    remembered[name] = state.ticked
+    const lessons = Object.keys(remembered)
+    for (const old of lessons.slice(0, Math.max(0, lessons.length - maxRemembered))) {
+      Reflect.deleteProperty(remembered, old)
+    }
+  }
+  return state
+}
+
+/** Adds what an enrolled person has watched; a preview of a draft keeps nothing. */
+export async function reportLesson(
+  access: LessonAccess,
+  actor: Actor,
+  report: ReportProgress,
+): Promise<LessonProgress> {
+  const userId = recordKeeper(access, actor)
+  if (userId === null) throw notAllowed('A preview keeps no progress.')
+  return reportProgress(access, userId, report)
+}
