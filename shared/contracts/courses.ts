@@ -17,11 +17,7 @@ export const hazardSchema = z.strictObject({
 })
 export type Hazard = z.infer<typeof hazardSchema>
 
-const titleSchema = z
-  .string()
-  .trim()
-  .min(1, 'Give it a name.')
-  .max(90, 'At most 90 characters.')
+const titleSchema = z.string().trim().min(1, 'Give it a name.').max(90, 'At most 90 characters.')
 const versionSchema = z.number().int().min(1)
 
 // ---- The register and a sheet, as visitors and learners see them
@@ -225,6 +221,9 @@ export const benchCourseSchema = z.object({
   can: z.object({ edit: z.boolean(), issue: z.boolean() }),
 })
 export type BenchCourse = z.infer<typeof benchCourseSchema>
+/** The outline after a stage or lesson was added to it, with the new row's id. */
+export const extendedBenchCourseSchema = benchCourseSchema.extend({ createdId: z.number() })
+export type ExtendedBenchCourse = z.infer<typeof extendedBenchCourseSchema>
 
 export const benchCourseRowSchema = z.object({
   id: z.number(),
@@ -337,6 +336,8 @@ export const benchLessonSchema = z.object({
   isSample: z.boolean(),
   kit: z.array(kitItemSchema),
   version: versionSchema,
+  savedAt: z.iso.datetime(),
+  /** The one that is shown, or the newest while none is shown or one is being checked. */
   video: z
     .object({
       id: z.number(),
@@ -349,6 +350,8 @@ export const benchLessonSchema = z.object({
       posterUrl: z.string().nullable(),
     })
     .nullable(),
+  /** The newest, when it was refused and another is still shown. */
+  refusedVideo: z.object({ originalName: z.string(), refusal: z.string() }).nullable(),
   captions: z.array(captionTrackSchema),
   stops: z.array(benchStopSchema),
   snags: z.array(snagSchema),
