@@ -116,6 +116,11 @@ export async function issueRevision(revisionId: number, issuedAt = new Date()) {
   await db.update(courses).set({ state: 'issued' }).where(eq(courses.id, row!.courseId))
 }
 
+/** Takes no new enrolments from now on. */
+export async function closeCourse(courseId: number) {
+  await db.update(courses).set({ state: 'closed' }).where(eq(courses.id, courseId))
+}
+
 /** A stage at the end of a revision. */
 export async function createStage(revisionId: number, values: Insert<typeof stages> = {}) {
   const number = nextNumber()
