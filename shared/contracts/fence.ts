@@ -55,8 +55,15 @@ export const questionSchema = z.object({
 })
 export type Question = z.infer<typeof questionSchema>
 
+/** As many answers as one question takes. */
+export const answersLimit = 500
+
 /** A question with its answers, the settled one first, then oldest first. */
-export const threadSchema = questionSchema.extend({ answers: z.array(fenceAnswerSchema).max(500) })
+export const threadSchema = questionSchema.extend({
+  answers: z.array(fenceAnswerSchema).max(answersLimit),
+  /** The room's number when the thread was read: of two states the one with the higher number is newer. */
+  asOf: z.number(),
+})
 export type Thread = z.infer<typeof threadSchema>
 
 /** A row of the page over all lessons of a course. */
@@ -91,11 +98,19 @@ export type SettleQuestion = z.infer<typeof settleQuestionSchema>
 export const questionsQuerySchema = z.object({
   cursor: z.string().max(120).optional(),
   limit: z.coerce.number().int().min(1).max(100).default(20),
-  state: z.enum(['all', 'open', 'unanswered', 'settled']).default('all'),
+  state: z.enum(['all', 'open', 'unanswered', 'settled', 'mine']).default('all'),
   order: z.enum(['newest', 'moment']).default('newest'),
   stage: stableKeySchema.optional(),
+  /** Stands in the title or the text. */
+  words: z.string().trim().max(80, 'At most 80 characters.').optional(),
 })
 export type QuestionsQuery = z.infer<typeof questionsQuerySchema>
+
+/** The last number a reader saw of a room. */
+export const eventsQuerySchema = z.object({
+  after: z.coerce.number().int().min(0).max(4_294_967_295),
+})
+export type EventsQuery = z.infer<typeof eventsQuerySchema>
 
 export const fenceEventKindSchema = z.enum([
   'asked',

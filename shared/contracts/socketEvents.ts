@@ -43,8 +43,10 @@ export type Joined = z.infer<typeof joinedSchema>
 
 /** Every acknowledgement has this shape. */
 export type Acknowledgement<T> =
-  | { ok: true; data: T }
-  | { ok: false; error: { code: string; detail: string } }
+  { ok: true; data: T } | { ok: false; error: { code: string; detail: string } }
+
+/** Readers hear that somebody writes for so long, unless it is said again. */
+export const writingLastsMs = 6000
 
 /** Names of what the client sends. */
 export const clientEvents = {
