@@ -268,6 +268,20 @@ export async function createQuiz(
   return exercise
 }
 
+/** A pad of 2.6 × 1.1 × 0.1 m whose volume is asked: 0.286 m³, named slips among the wrong ones. */
+export const slabDefinition: CalculatorDefinition = {
+  calculator: 'slab',
+  inputs: {
+    length: { mode: 'fixed', value: '2.6 m' },
+    width: { mode: 'fixed', value: '1.1 m' },
+    thickness: { mode: 'fixed', value: '100 mm' },
+  },
+  asked: 'volume',
+  tolerance: { kind: 'absolute', value: 0.001 },
+  hints: ['All three sides in metres.', 'Then multiply.'],
+  slips: ['litres', 'thickness-in-centimetres'],
+}
+
 /** A question with one right choice, `wet`, and one wrong choice, `dry`. */
 export const singleQuestion = (key = 'which-mix'): QuizQuestion => ({
   key,
