@@ -14,11 +14,16 @@ const WIDTHS: readonly (readonly [letters: string, width: number])[] = [
 const OTHER = 700
 
 const widthOf = new Map(
-  WIDTHS.flatMap(([letters, width]) => [...letters].map((letter) => [letter, width] as const)),
+  WIDTHS.flatMap(([letters, width]) =>
+    Array.from(letters).map((letter) => [letter, width] as const),
+  ),
 )
 
 /** Width of a label in pixels at a height in pixels, a little generous, so that boxes can be kept apart. */
 export function measureText(text: string, size: number): number {
-  const thousandths = [...text].reduce((sum, letter) => sum + (widthOf.get(letter) ?? OTHER), 0)
+  const thousandths = Array.from(text).reduce(
+    (sum, letter) => sum + (widthOf.get(letter) ?? OTHER),
+    0,
+  )
   return (thousandths * size) / 1000
 }
