@@ -7,7 +7,8 @@ import { lockRevision, touchRevision } from './drafts.queries'
 /** What the triggers raise when a row of an issued revision is written. */
 const frozenErrno = 1644
 
-const isIssued = () =>
+/** 409 `issued`: learners have this revision. */
+export const issuedRevision = () =>
   conflict(
     'issued',
     'This revision is issued and stays as learners have it. Changes belong into the next one.',
@@ -25,13 +26,13 @@ export async function changeDraft<T>(
     return await inTransaction(async (tx) => {
       const revision = await lockRevision(revisionId, tx)
       if (!revision) throw notFound('revision')
-      if (revision.issuedAt) throw isIssued()
+      if (revision.issuedAt) throw issuedRevision()
       const result = await work(tx, revision)
       await touchRevision(revisionId, tx)
       return result
     })
   } catch (error) {
-    throw errorNumber(error) === frozenErrno ? isIssued() : error
+    throw errorNumber(error) === frozenErrno ? issuedRevision() : error
   }
 }
 
@@ -41,7 +42,7 @@ export async function changeDraftOf<T>(
   work: (tx: Transaction, revision: RevisionRow) => Promise<T>,
 ): Promise<T> {
   const draft = await findDraftRevision(courseId)
-  if (!draft) throw isIssued()
+  if (!draft) throw issuedRevision()
   return changeDraft(draft.id, work)
 }
 

@@ -1,3 +1,36 @@
-import { Router } from 'express'
+import { Router, type NextFunction, type Request, type Response } from 'express'
+import { z } from 'zod'
+import { readParams } from '../middleware/validate'
+import { findPosterFile, findVideoFile, type StoredFile } from './media.service'
 
 export const mediaRouter = Router()
+
+const videoParams = z.object({ videoId: z.coerce.number().int().positive() })
+const viewerOf = ({ actor, session }: Request) => ({ actor, kit: session.kit ?? {} })
+
+/** Sends a file or the part that is asked for; what was aborted by the browser is no error. */
+function sendStored(file: StoredFile, response: Response, next: NextFunction) {
+  response.setHeader('Content-Type', file.contentType)
+  response.setHeader('Cache-Control', 'private, max-age=3600')
+  response.setHeader('ETag', `"${file.tag}"`)
+  response.setHeader('Content-Disposition', 'inline')
+  response.sendFile(
+    file.name,
+    { root: file.root, dotfiles: 'allow', lastModified: false },
+    (error?: NodeJS.ErrnoException) => {
+      if (!error || error.code === 'ECONNABORTED' || error.code === 'EPIPE') return
+      if (!response.headersSent) response.setHeader('Cache-Control', 'no-store')
+      next(error)
+    },
+  )
+}
+
+mediaRouter.get('/media/videos/:videoId/file', async (request, response, next) => {
+  const { videoId } = readParams(request, videoParams)
+  sendStored(await findVideoFile(videoId, viewerOf(request)), response, next)
+})
+
+mediaRouter.get('/media/videos/:videoId/poster', async (request, response, next) => {
+  const { videoId } = readParams(request, videoParams)
+  sendStored(await findPosterFile(videoId, viewerOf(request)), response, next)
+})
