@@ -19,7 +19,7 @@ declare module 'express-session' {
       string,
       { seed: number; triesUsed: number; solved: boolean; answeredKey?: string }
     >
-    /** Their ticked kit items, by lesson. */
+    /** Their ticked kit items, by the lesson's id. */
     kit: Record<string, string[]>
   }
 }

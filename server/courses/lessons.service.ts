@@ -3,7 +3,7 @@ import type { Video } from '../../shared/contracts/media'
 import { can, type Actor } from '../../shared/contracts/policies'
 import { notFound } from '../errors'
 import { listTapeStops } from '../exercises/stopStates.service'
-import { describeKit, kitNameOf } from '../progress/kitChecks.service'
+import { describeKit } from '../progress/kitChecks.service'
 import { describeProgress } from '../progress/lessonProgress.service'
 import { recordKeeper, type LessonAccess } from './access.service'
 import { findReadyVideo, listCaptionTracks, listHindsight } from './lessons.queries'
@@ -44,7 +44,7 @@ export async function describeLesson(
     [
       findDrawnBy(course.id),
       describeStages(revision, userId),
-      describeKit(lesson.id, userId, remembered.kit[kitNameOf(lesson.id)] ?? []),
+      describeKit(lesson.id, userId, remembered.kit[lesson.id] ?? []),
       describeVideo(lesson.videoId),
       listTapeStops(access, userId, remembered.samples),
       listHindsight(course.id, lesson.key),

@@ -3,9 +3,6 @@ import type { KitState } from '../../shared/contracts/progress'
 import { invalid } from '../errors'
 import { insertTicks, listKitItems, listTickedKeys } from './kitChecks.queries'
 
-/** The name under which a session remembers a lesson's ticks. */
-export const kitNameOf = (lessonId: number) => `lesson-${lessonId}`
-
 function stateOf(kit: { key: string }[], ticked: Iterable<string>): KitState {
   const set = new Set(ticked)
   const keys = kit.map(({ key }) => key).filter((key) => set.has(key))

@@ -2,10 +2,10 @@ import type { Actor } from '../../shared/contracts/policies'
 import type { KitState, LessonProgress, ReportProgress } from '../../shared/contracts/progress'
 import { recordKeeper, type LessonAccess } from '../courses/access.service'
 import { notAllowed } from '../errors'
-import { kitNameOf, tickKit } from './kitChecks.service'
+import { tickKit } from './kitChecks.service'
 import { reportProgress } from './lessonProgress.service'
 
-/** Lessons whose ticks one session remembers; the oldest are forgotten beyond it. */
+/** Other lessons whose ticks one session remembers. */
 const maxRemembered = 60
 
 /** Ticks rows of a lesson's kit check: kept for the enrolled, remembered by the session for all others. */
@@ -16,15 +16,12 @@ export async function tickLessonKit(
   remembered: Record<string, string[]>,
 ): Promise<KitState> {
   const { id } = access.lesson
-  const name = kitNameOf(id)
   const userId = recordKeeper(access, actor)
-  const state = await tickKit(id, userId, remembered[name] ?? [], ticked)
+  const state = await tickKit(id, userId, remembered[id] ?? [], ticked)
   if (userId === null) {
-    remembered[name] = state.ticked
-    const lessons = Object.keys(remembered)
-    for (const old of lessons.slice(0, Math.max(0, lessons.length - maxRemembered))) {
-      Reflect.deleteProperty(remembered, old)
-    }
+    remembered[id] = state.ticked
+    const others = Object.keys(remembered).filter((key) => key !== String(id))
+    for (const other of others.slice(maxRemembered)) Reflect.deleteProperty(remembered, other)
   }
   return state
 }
