@@ -4,6 +4,9 @@ import { box, colour, line, pen, polygon } from './pen'
 
 export const BOARD = 38
 export const PEG = 45
+/** The inside of the demonstration's form, and where its pegs stand along the boards. */
+export const FORM = { length: 2600, width: 1100 } as const
+export const PEGS = { long: [150, 890, 1665, 2405], short: [160, 960] } as const
 
 /** Places millimetres of a plan on the picture; `lean` shears the form, in pixels to the right for each millimetre up. */
 export interface PlanView {
@@ -57,6 +60,18 @@ export function peg(ctx: Ctx, view: PlanView, x: number, y: number, isMarked = f
   const size = PEG * view.scale
   const fill = isMarked ? colour.chalk : colour.timber3
   box(ctx, px, py, size, size, { fill, stroke: colour.ink, width: pen.part })
+}
+
+/** The four boards of the form and its pegs. */
+export function wholeForm(ctx: Ctx, view: PlanView, isFixed = false): void {
+  const { length, width } = FORM
+  board(ctx, view, [length + BOARD, 0], [-BOARD, 0])
+  board(ctx, view, [-BOARD, width], [length + BOARD, width])
+  board(ctx, view, [0, 0], [0, width])
+  board(ctx, view, [length, width], [length, 0])
+  const out = -BOARD - PEG
+  for (const x of PEGS.long) for (const y of [out, width + BOARD]) peg(ctx, view, x, y, isFixed)
+  for (const x of [out, length + BOARD]) for (const y of PEGS.short) peg(ctx, view, x, y, isFixed)
 }
 
 /** The small square that says a corner is one. */

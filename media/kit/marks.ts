@@ -8,6 +8,7 @@ const FIGURE = 28
 interface Dimension {
   /** Distance of the dimension line from what it measures; to the left of the way from `a` to `b`. */
   offset: number
+  /** Left empty where the figure finds no room on the line and is written beside it. */
   label: string
   /** 0 to 1: the line grows, then the figure appears. */
   progress?: number
@@ -52,6 +53,7 @@ export function dimension(ctx: Ctx, a: Point, b: Point, style: Dimension): void 
   if (grown < 1) return
   line(ctx, move(b, sign * 8), move(b, offset + sign * 10), fine)
   tick(to)
+  if (!label) return
   const middle = between(from, to, 0.5)
   const lettering = { size, weight: 700, align: 'center', baseline: 'middle' } as const
   const half = widthOf(ctx, label, lettering) / 2 + 9

@@ -1,5 +1,5 @@
 import { grains } from '../../kit/concrete'
-import { at, board, peg, stoneBed } from '../../kit/formPlan'
+import { at, FORM, stoneBed, wholeForm } from '../../kit/formPlan'
 import type { PlanView } from '../../kit/formPlan'
 import { mix, ramp } from '../../kit/motion'
 import type { Ctx, Point } from '../../kit/pen'
@@ -7,7 +7,7 @@ import { box, colour, faded, line, pen, polygon, write } from '../../kit/pen'
 import { drawingSheet, heading, titleBlock } from '../../kit/sheet'
 import type { Timeline } from '../../kit/timeline'
 
-const [LENGTH, WIDTH] = [2600, 1100] as const
+const { length: LENGTH, width: WIDTH } = FORM
 /** Ten millimetres to the metre over the width, towards the front. */
 const FALL = Math.round(WIDTH * 0.01)
 const VIEW: PlanView = { corner: [156, 470], scale: 0.235, lean: 0 }
@@ -53,12 +53,7 @@ export function drawPour(ctx: Ctx, t: number, time: Timeline): void {
     faded(ctx, wet * 0.4, () => box(ctx, x, y, w, h, { fill: colour.slate }))
     poured(ctx, filled)
     if (struck > 0) smooth(ctx, x + w * (1 - struck), y, w * struck, h)
-    board(ctx, VIEW, [LENGTH + 38, 0], [-38, 0])
-    board(ctx, VIEW, [-38, WIDTH], [LENGTH + 38, WIDTH])
-    board(ctx, VIEW, [0, 0], [0, WIDTH])
-    board(ctx, VIEW, [LENGTH, WIDTH], [LENGTH, 0])
-    for (const px of [300, 1300, 2300]) for (const py of [-83, WIDTH + 38]) peg(ctx, VIEW, px, py)
-    for (const px of [-83, LENGTH + 38]) for (const py of [160, 960]) peg(ctx, VIEW, px, py)
+    wholeForm(ctx, VIEW)
     faded(ctx, ramp(t, tip + 1, 0.4) * (1 - ramp(t, strike - 0.3, 0.3)), () =>
       workBack(ctx, filled),
     )

@@ -1,5 +1,5 @@
 import { bag } from '../../kit/concrete'
-import { at, stoneBed } from '../../kit/formPlan'
+import { at, FORM, stoneBed } from '../../kit/formPlan'
 import { dimension } from '../../kit/marks'
 import { clamp01, during, mix, ramp } from '../../kit/motion'
 import type { Ctx } from '../../kit/pen'
@@ -8,7 +8,7 @@ import { drawingSheet, heading, titleBlock } from '../../kit/sheet'
 import type { Timeline } from '../../kit/timeline'
 
 /** The pad in millimetres, and what the bag in the picture says. */
-const PAD = { length: 2600, width: 1100, thickness: 100 }
+const PAD = { ...FORM, thickness: 100 }
 const BAG = { litres: 11.5, waterFrom: 2.5, waterTo: 3 }
 const WASTE = 0.1
 const VOLUME = (PAD.length * PAD.width * PAD.thickness) / 1e9
@@ -49,7 +49,7 @@ export function drawBags(ctx: Ctx, t: number, time: Timeline): void {
   )
   heading(ctx, 'How much does the form hold?', t, time.start('pad') - 0.3, time.start('ask-bags'))
   heading(ctx, 'How many bags do I buy?', t, time.start('ask-bags'), answer)
-  heading(ctx, 'Part of a bag is a whole bag', t, answer, time.start('least') - 0.3)
+  heading(ctx, 'Part of a bag counts as a bag', t, answer, time.start('least') - 0.3)
 }
 
 function drawPad(ctx: Ctx, t: number, time: Timeline): void {

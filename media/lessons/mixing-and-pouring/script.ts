@@ -9,8 +9,8 @@ export const steps: Step[] = [
     lines: [
       {
         id: 'burns',
-        say: 'Before you open a bag: wet cement burns skin, and it does not hurt at first.',
-        cap: 'Before you open a bag: wet cement burns\nskin, and it does not hurt at first.',
+        say: 'Before you open a bag: wet cement burns skin without hurting at first.',
+        cap: 'Before you open a bag: wet cement\nburns skin without hurting at first.',
       },
       {
         id: 'gloves',
@@ -112,7 +112,7 @@ export const steps: Step[] = [
       {
         id: 'tip',
         say: 'Wet the stone, tip from the far corner and work back.',
-        cap: 'Wet the stone, tip from the far corner\nand work back.',
+        cap: 'Wet the stone, tip from the far\ncorner and work back.',
         after: 0.8,
       },
       {
@@ -124,7 +124,7 @@ export const steps: Step[] = [
       {
         id: 'code',
         say: 'Local code, and the words on your bag, come before mine.',
-        cap: 'Local code, and the words on your bag,\ncome before mine.',
+        cap: 'Local code, and the words\non your bag, come before mine.',
       },
     ],
   },

@@ -1,4 +1,4 @@
-import { at, board, closeUp, hammer, peg, squareSign, stoneBed } from '../../kit/formPlan'
+import { at, board, closeUp, hammer, peg, PEGS, squareSign, stoneBed } from '../../kit/formPlan'
 import type { PlanView } from '../../kit/formPlan'
 import { crowsFoot, dimension, tag, tape } from '../../kit/marks'
 import { between, during, ramp } from '../../kit/motion'
@@ -6,8 +6,10 @@ import type { Ctx, Point } from '../../kit/pen'
 import { colour, faded, line, polygon, write } from '../../kit/pen'
 import { drawingSheet, heading, titleBlock } from '../../kit/sheet'
 import type { Timeline } from '../../kit/timeline'
-import { ACROSS, LARGER, LONG, PEGS, SHORT, TAPPED } from './form'
+import { ACROSS, LARGER, LONG, SHORT } from './form'
 
+/** The far peg of the short board is the one that is tapped. */
+const TAPPED = PEGS.short[1]
 const FIRST_READING = 1506
 
 /** What the tape reads while the peg is tapped: three taps of two millimetres. */
@@ -27,7 +29,8 @@ export function drawCorner(ctx: Ctx, t: number, time: Timeline): void {
   const leaning: PlanView = { ...straight, lean: cosine * LARGER * scale }
   const [shortMark, longMark] = [at(leaning, 0, SHORT), at(straight, LONG, 0)]
   const tapping = during(t, time.start('tap'), lastTap + 0.9)
-  drawingSheet(ctx, 'Plan', () => {
+  drawingSheet(ctx, '', () => {
+    write(ctx, 'Plan', [76, 574], { size: 20, fill: colour.ink2 })
     stoneBed(ctx, straight, 2100, 1200)
     polygon(ctx, [at(straight, 0, 0), at(leaning, 0, 1200), at(straight, 0, 1200)], {
       fill: colour.stoneBed,
@@ -62,7 +65,7 @@ export function drawCorner(ctx: Ctx, t: number, time: Timeline): void {
       progress: ramp(t, time.start('long') + 0.2, 1),
     })
     const pulled = ramp(t, time.start('five') + 0.1, 1.2)
-    tape(ctx, shortMark, longMark, pulled, 50 * scale)
+    tape(ctx, shortMark, between(shortMark, longMark, 1.07), pulled, 50 * scale)
     crowsFoot(ctx, shortMark, 0, ramp(t, time.start('short') + 1.2, 0.5))
     crowsFoot(ctx, longMark, -Math.PI / 2, ramp(t, time.start('long') + 1.1, 0.5))
     const asks = during(t, time.start('ask-tape') + 0.6, time.start('five') + 0.3)

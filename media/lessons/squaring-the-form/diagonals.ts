@@ -1,4 +1,4 @@
-import { at, board, peg, stoneBed } from '../../kit/formPlan'
+import { at, FORM, stoneBed, wholeForm } from '../../kit/formPlan'
 import type { PlanView } from '../../kit/formPlan'
 import { dimension, tag, tape } from '../../kit/marks'
 import { between, during, ramp } from '../../kit/motion'
@@ -6,7 +6,7 @@ import type { Ctx, Point } from '../../kit/pen'
 import { colour, faded, line, polygon, write } from '../../kit/pen'
 import { drawingSheet, heading, titleBlock } from '../../kit/sheet'
 import type { Timeline } from '../../kit/timeline'
-import { FORM, LARGER, PEGS } from './form'
+import { LARGER } from './form'
 
 /** How far the far board is racked in the last demonstration, in millimetres. */
 const RACKED = 13
@@ -20,14 +20,7 @@ export function drawDiagonals(ctx: Ctx, t: number, time: Timeline): void {
   const far = (dx: number) => String(Math.round(Math.hypot(length + dx * RACKED * racked, width)))
   drawingSheet(ctx, 'Plan', () => {
     stoneBed(ctx, view, length, width)
-    board(ctx, view, [length + 38, 0], [-38, 0])
-    board(ctx, view, [-38, width], [length + 38, width])
-    board(ctx, view, [0, 0], [0, width])
-    board(ctx, view, [length, width], [length, 0])
-    for (const x of PEGS.long)
-      for (const y of [-83, width + 38]) peg(ctx, view, x, y, t > time.start('fix') + 1)
-    for (const x of [-83, length + 38])
-      for (const y of PEGS.short) peg(ctx, view, x, y, t > time.start('fix') + 1)
+    wholeForm(ctx, view, t > time.start('fix') + 1)
     dimension(ctx, at(view, 0, -38), at(view, length, -38), { offset: -56, label: '2600' })
     dimension(ctx, at(view, -38, 0), at(view, -38, width), { offset: 54, label: '1100' })
     const ways = [
