@@ -1,18 +1,20 @@
 import { mkdtemp, rm, stat } from 'node:fs/promises'
 import { createServer, type Server } from 'node:net'
+import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { createConnection, type RowDataPacket } from 'mysql2/promise'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { startDatabase, type PrivateDatabase } from '../../../server/cli/database'
 import { waitUntil } from '../../../server/cli/processes'
-import { chooseTestParent } from '../../../server/cli/testDatabase'
 
+// On a real disk: in memory MariaDB maps its log, and nothing could be lost by a kill.
 let folder: string
 let database: PrivateDatabase
 
 beforeAll(async () => {
-  folder = await mkdtemp(join(await chooseTestParent(), 'good-footing-database-'))
-})
+  folder = await mkdtemp(join(tmpdir(), 'good-footing-database-'))
+  await start()
+}, 120_000)
 
 afterAll(async () => {
   await database.stop()
