@@ -3,3 +3,7 @@ declare module '*.vue' {
   const component: DefineComponent<object, object, unknown>
   export default component
 }
+declare module 'video.js/core' {
+  import videojs from 'video.js'
+  export default videojs
+}

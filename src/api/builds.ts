@@ -1,4 +1,9 @@
-import { buildRowSchema, buildSchema } from '../../shared/contracts/builds'
+import {
+  buildRowSchema,
+  buildSchema,
+  fieldBookEntrySchema,
+  type PutInFieldBook,
+} from '../../shared/contracts/builds'
 import { pageOf } from '../../shared/contracts/pagination'
 import { queryString, request } from './client'
 
@@ -8,3 +13,10 @@ export const fetchBuilds = (cursor: string | null = null) =>
   request(buildPageSchema, `/builds${queryString({ cursor })}`)
 
 export const fetchBuild = (slug: string) => request(buildSchema, `/courses/${slug}/build`)
+
+export const putInFieldBook = (slug: string, body: PutInFieldBook, idempotencyKey: string) =>
+  request(fieldBookEntrySchema, `/courses/${slug}/field-book-entries`, {
+    method: 'POST',
+    body,
+    idempotencyKey,
+  })

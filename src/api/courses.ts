@@ -1,6 +1,10 @@
-import { z } from 'zod'
+import type { z } from 'zod'
 import { buildSchema } from '../../shared/contracts/builds'
-import { sheetSchema, sheetSummarySchema } from '../../shared/contracts/courses'
+import {
+  sheetSchema,
+  sheetSummarySchema,
+  watchedLessonSchema,
+} from '../../shared/contracts/courses'
 import { pageOf } from '../../shared/contracts/pagination'
 import { queryString, request } from './client'
 
@@ -17,3 +21,15 @@ export const fetchSheet = (slug: string) => request(sheetSchema, `/courses/${slu
 
 export const enrol = (slug: string) =>
   request(buildSchema, `/courses/${slug}/enrolments`, { method: 'POST', body: {} })
+
+export interface LessonPlace {
+  slug: string
+  lessonKey: string
+  /** The draft, as staff see it before it is issued. */
+  isDraft: boolean
+}
+/** The address of a lesson, or of something in it. */
+export const lessonPath = ({ slug, lessonKey, isDraft }: LessonPlace, rest = '') =>
+  `/courses/${slug}/lessons/${lessonKey}${rest}${queryString({ draft: isDraft ? 1 : null })}`
+
+export const fetchLesson = (place: LessonPlace) => request(watchedLessonSchema, lessonPath(place))
