@@ -54,7 +54,17 @@ export const severalQuestionSchema = z.strictObject({ choices: choicesSchema })
 export const numberQuestionSchema = z.strictObject({
   /** The right value as the instructor typed it, with its unit. */
   answer: typedValueSchema.min(1),
-  quantity: z.enum(['length', 'area', 'volume', 'angle', 'ratio', 'mass', 'count', 'percent', 'time']),
+  quantity: z.enum([
+    'length',
+    'area',
+    'volume',
+    'angle',
+    'ratio',
+    'mass',
+    'count',
+    'percent',
+    'time',
+  ]),
   tolerance: toleranceSchema,
   feedback: z.string().trim().max(400),
 })
@@ -84,7 +94,11 @@ const questionBase = { key: stableKeySchema, prompt: z.string().trim().max(500) 
 /** A question of a quiz as staff see it, with its right answers. */
 export const quizQuestionSchema = z.discriminatedUnion('kind', [
   z.strictObject({ ...questionBase, kind: z.literal('single'), definition: singleQuestionSchema }),
-  z.strictObject({ ...questionBase, kind: z.literal('several'), definition: severalQuestionSchema }),
+  z.strictObject({
+    ...questionBase,
+    kind: z.literal('several'),
+    definition: severalQuestionSchema,
+  }),
   z.strictObject({ ...questionBase, kind: z.literal('number'), definition: numberQuestionSchema }),
   z.strictObject({ ...questionBase, kind: z.literal('order'), definition: orderQuestionSchema }),
 ])
@@ -120,6 +134,8 @@ export const learnerQuestionSchema = z.object({
   choices: z.array(z.object({ id: z.string(), text: z.string() })).optional(),
   items: z.array(z.object({ id: z.string(), text: z.string() })).optional(),
   quantity: z.string().optional(),
+  /** The unit a bare number takes, and which the field shows, in either system. */
+  unit: z.object({ metric: z.string(), imperial: z.string() }).optional(),
 })
 export type LearnerQuestion = z.infer<typeof learnerQuestionSchema>
 

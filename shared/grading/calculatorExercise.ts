@@ -1,4 +1,4 @@
-import type { Calculator, CalculatorOutput, Slip, Value, Values } from '../calculators/calculator'
+import type { Calculator, CalculatorOutput, Slip } from '../calculators/calculator'
 import {
   convertText,
   fieldUnit,
@@ -15,7 +15,7 @@ import type {
 } from '../contracts/exercises'
 import { parseQuantity } from '../units/parse'
 import { drawInputs } from './drawInputs'
-import { isWithin } from './tolerance'
+import { findSlip, matches } from './slips'
 import { unreadVerdict } from './verdict'
 
 export type CalculatorExercise = Extract<Exercise, { kind: 'calculator' }>
@@ -82,37 +82,6 @@ export function readAnswer(output: CalculatorOutput, text: string, system: UnitS
   if (choice) return { ok: true, value: choice.value }
   return { ok: false, message: 'Pick one of the choices.' }
 }
-
-function matches(value: Value, right: Value, { tolerance }: CalculatorDefinition): boolean {
-  if (typeof value === 'number' && typeof right === 'number')
-    return isWithin(value, right, tolerance)
-  return value === right
-}
-
-/** The named slip whose wrong value is nearest to the answer and within the tolerance; never one that gives the right value. */
-function findSlip(
-  calculator: Calculator,
-  definition: CalculatorDefinition,
-  run: { values: Values; outputs: Values },
-  value: number | string,
-  system: UnitSystem,
-): Slip | undefined {
-  const right = run.outputs[definition.asked]
-  const found = namedSlips(calculator, definition).flatMap((slip) => {
-    const wrong = slip.wrong(run.values, run.outputs, system)
-    if (wrong === undefined || right === undefined) return []
-    if (matches(wrong, right, definition) || !matches(value, wrong, definition)) return []
-    const distance = typeof wrong === 'number' ? Math.abs(Number(value) - wrong) : 0
-    return [{ slip, distance }]
-  })
-  return found.sort((a, b) => a.distance - b.distance)[0]?.slip
-}
-
-/** The slips of the asked output that this stop names. */
-export const namedSlips = (
-  calculator: Calculator,
-  { slips, asked }: CalculatorDefinition,
-): Slip[] => calculator.slips.filter(({ id, output }) => output === asked && slips.includes(id))
 
 const verdict = (outcome: Verdict['outcome'], message: string, wayBack: string): Verdict => ({
   right: outcome === 'right',

@@ -3,6 +3,7 @@ import { fieldUnit, showInput } from '../calculators/fields'
 import type { CalculatorDefinition, ExerciseInput, UnitSystem } from '../contracts/exercises'
 import { clean } from '../units/number'
 import { parseQuantity } from '../units/parse'
+import { unitIn } from '../units/unit'
 import { createRandom, seedFor } from './seededRandom'
 
 type Ranged = Extract<ExerciseInput, { mode: 'ranged' }>
@@ -45,15 +46,6 @@ function textIn(input: CalculatorInput, text: string, system: UnitSystem): strin
   const unit = fieldUnit(input, 'metric')
   const read = parseQuantity(text, input.quantity, { system: 'metric', defaultUnit: unit })
   if (!read.ok) return text
-  const isOfSystem = system === 'metric' ? !IMPERIAL.has(read.unit) : !METRIC.has(read.unit)
+  const isOfSystem = unitIn(read.unit, system) === read.unit
   return isOfSystem && !read.bare ? text : showInput(input, read.value, system)
 }
-
-const IMPERIAL = new Set(
-  'in,ft,ft in,yd,ft²,in²,yd²,ft³,in³,yd³,gal,qt,pt,lb,oz,lb/ft³,lb/yd³,psf,psi,lbf,in/ft'.split(
-    ',',
-  ),
-)
-const METRIC = new Set(
-  'mm,cm,m,m²,mm²,cm²,m³,L,ml,cm³,kg,g,t,kg/m³,kg/L,kPa,Pa,MPa,N,kN,kgf,mm/m,cm/m,m/m'.split(','),
-)

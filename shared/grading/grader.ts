@@ -14,7 +14,7 @@ export interface ExerciseProblem {
 }
 
 /** What a learner needs to see of a question; nothing in it tells the answer. */
-export type LearnerParts = Pick<LearnerQuestion, 'choices' | 'items' | 'quantity'>
+export type LearnerParts = Pick<LearnerQuestion, 'choices' | 'items' | 'quantity' | 'unit'>
 
 /** One kind of question: grades it, hides its answer, shows it at last, and finds what is wrong with it. */
 export interface QuestionGrader<Definition> {

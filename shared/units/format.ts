@@ -21,11 +21,9 @@ export function formatQuantity(
   system: UnitSystem,
   options: FormatOptions = {},
 ): string {
-  const name = options.unit ?? displayUnit(quantity, system, options.scale ?? 'site')
+  const name = options.unit ?? unitForSize(value, quantity, system, options.scale)
   if (!Number.isFinite(value)) return '–'
-  if (quantity === 'length' && (name === 'ft in' || (name === 'in' && system === 'imperial'))) {
-    return formatFeetInches(value)
-  }
+  if (quantity === 'length' && FEET_INCHES.has(name)) return formatFeetInches(value)
   if (quantity === 'ratio' && name === '1:n') {
     return value > 0 ? `1:${formatNumber(1 / value, 2)}` : formatNumber(value, 4)
   }
@@ -34,6 +32,23 @@ export function formatQuantity(
     return `${sign}${formatSixteenths(Math.round(Math.abs(value) * 192))} in/ft`
   }
   return formatInUnit(value, quantity, name)
+}
+
+/** Units of length that are shown as feet and inches together. */
+const FEET_INCHES = new Set(['ft in', 'in', 'ft', 'yd'])
+/** Below 100 L, or a cubic foot, a volume is said in litres or quarts. */
+const SMALL_VOLUME: Record<UnitSystem, number> = { metric: 0.1, imperial: 0.0283168 }
+
+function unitForSize(
+  value: number,
+  quantity: Quantity,
+  system: UnitSystem,
+  scale: FormatOptions['scale'],
+): string {
+  if (quantity === 'volume' && Math.abs(value) < SMALL_VOLUME[system]) {
+    return system === 'metric' ? 'L' : 'qt'
+  }
+  return displayUnit(quantity, system, scale)
 }
 
 function formatInUnit(value: number, quantity: Quantity, name: string): string {

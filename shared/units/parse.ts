@@ -17,6 +17,8 @@ export interface ParseOptions {
 
 /** Longer than any number with a unit; what is longer was pasted by mistake. */
 const LONGEST = 80
+/** In SI; no answer of a garden job comes near it, not even a forgotten root in mm. */
+const LARGEST = 1e15
 const SIMPLE = new RegExp(String.raw`^(${AMOUNT}) ?(\D.*)?$`, 'i')
 const SLOPES: Quantity[] = ['angle', 'ratio', 'risePer12']
 /** A fraction of a ruler, as in 1/4 in a field of in/ft; 4/12 is a pitch. */
@@ -78,7 +80,7 @@ export function parseQuantity(
   const sign = signed?.[1] === '-' ? -1 : 1
   const read = readUnsigned(signed?.[2] ?? '', quantity, options)
   if (typeof read === 'string') return refuse(text, quantity, read)
-  if (!Number.isFinite(read.value)) return refuse(text, quantity, 'is not a size anything has')
+  if (!(Math.abs(read.value) < LARGEST)) return refuse(text, quantity, 'is not a size anything has')
   return {
     ok: true,
     value: read.value === 0 ? 0 : sign * read.value,

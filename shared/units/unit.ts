@@ -159,3 +159,58 @@ export function quantitiesOfUnit(written: string): Quantity[] {
   if (written.trim() === '') return []
   return (Object.keys(units) as Quantity[]).filter((quantity) => findUnit(quantity, written))
 }
+
+/** Units of one system with the unit a person of the other thinks in. */
+const counterparts: Record<UnitSystem, Record<string, string>> = {
+  metric: {
+    mm: 'in',
+    cm: 'in',
+    m: 'ft',
+    'm²': 'ft²',
+    'mm²': 'in²',
+    'cm²': 'in²',
+    'm³': 'yd³',
+    L: 'qt',
+    ml: 'in³',
+    'cm³': 'in³',
+    kg: 'lb',
+    g: 'oz',
+    t: 'lb',
+    'kg/m³': 'lb/ft³',
+    'kg/L': 'lb/ft³',
+    kPa: 'psf',
+    Pa: 'psf',
+    MPa: 'psi',
+    N: 'lbf',
+    kN: 'lbf',
+    kgf: 'lbf',
+    'mm/m': 'in/ft',
+  },
+  imperial: {
+    in: 'mm',
+    ft: 'm',
+    'ft in': 'mm',
+    yd: 'm',
+    'ft²': 'm²',
+    'in²': 'cm²',
+    'yd²': 'm²',
+    'yd³': 'm³',
+    'ft³': 'm³',
+    'in³': 'cm³',
+    gal: 'L',
+    qt: 'L',
+    pt: 'L',
+    lb: 'kg',
+    oz: 'g',
+    'lb/ft³': 'kg/m³',
+    'lb/yd³': 'kg/m³',
+    psf: 'kPa',
+    psi: 'MPa',
+    lbf: 'N',
+    'in/ft': 'mm/m',
+  },
+}
+
+/** The unit itself where it belongs to the system or to both, else the one a person of that system thinks in. */
+export const unitIn = (name: string, system: UnitSystem): string =>
+  counterparts[system === 'metric' ? 'imperial' : 'metric'][name] ?? name
