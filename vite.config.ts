@@ -17,8 +17,7 @@ function precompress(folder: string): Plugin {
   return {
     name: 'precompress',
     apply: (_config, { command, isSsrBuild }) => command === 'build' && !isSsrBuild,
-    async closeBundle(error) {
-      if (error) return
+    async writeBundle() {
       const entries = await readdir(folder, { recursive: true, withFileTypes: true })
       for (const entry of entries) {
         if (!entry.isFile() || !compressedKinds.has(extname(entry.name))) continue
