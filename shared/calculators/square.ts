@@ -1,14 +1,11 @@
-import type { Calculator, Step, Values } from './calculator'
+import type { Calculator, Values } from './calculator'
 import { CalculatorInputError } from './calculator'
 import type { UnitSystem } from '../contracts/exercises'
-import { numberOf, optionalNumber, stepWriter } from './values'
+import { squareSlips } from './squareSlips'
+import { EASY_STEP, squareSteps } from './squareSteps'
+import { numberOf, optionalNumber } from './values'
 import { roundDownTo } from '../units/number'
 import { formatQuantity } from '../units/format'
-
-/** Steps that are easy to find on a tape: 50 mm, 1 in. */
-const EASY_STEP: Record<UnitSystem, number> = { metric: 0.05, imperial: 0.0254 }
-/** A common form board; what a mark on the wrong face is off by. An assumption. */
-const BOARD = 0.038
 
 function compute(values: Values, system: UnitSystem): Values {
   const sideA = numberOf(values, 'sideA')
@@ -23,63 +20,6 @@ function compute(values: Values, system: UnitSystem): Values {
   }
   return { unit, legShort: 3 * unit, legLong: 4 * unit, diagonal: 5 * unit, largestUnit }
 }
-
-function steps(values: Values, outputs: Values, system: UnitSystem): Step[] {
-  const writer = stepWriter(system)
-  const output = (name: string) => numberOf(outputs, name)
-  const short = Math.min(numberOf(values, 'sideA'), numberOf(values, 'sideB'))
-  const long = Math.max(numberOf(values, 'sideA'), numberOf(values, 'sideB'))
-  const legs = [output('legShort'), output('legLong')] as const
-  const squares = legs.map((leg) => writer.plainSquare(leg ** 2)).join(' + ')
-  const sum = writer.plainSquare(legs[0] ** 2 + legs[1] ** 2)
-  return [
-    {
-      label: 'Biggest unit that fits',
-      formula: 'the smaller of short side ÷ 3 and long side ÷ 4',
-      numbers: `${writer.length(short)} ÷ 3, ${writer.length(long)} ÷ 4`,
-      result: writer.length(output('largestUnit')),
-      output: 'largestUnit',
-    },
-    {
-      label: 'One unit',
-      formula: 'down to what is easy to mark',
-      numbers: values['unit'] === undefined ? writer.length(EASY_STEP[system]) : 'as you chose',
-      result: writer.length(output('unit')),
-      output: 'unit',
-    },
-    {
-      label: 'Short board',
-      formula: '3 × unit',
-      numbers: `3 × ${writer.length(output('unit'))}`,
-      result: writer.length(legs[0]),
-      output: 'legShort',
-    },
-    {
-      label: 'Long board',
-      formula: '4 × unit',
-      numbers: `4 × ${writer.length(output('unit'))}`,
-      result: writer.length(legs[1]),
-      output: 'legLong',
-    },
-    {
-      label: 'Square both and add',
-      formula: 'short² + long²',
-      numbers: `${writer.plain(legs[0])}² + ${writer.plain(legs[1])}² = ${squares}`,
-      result: sum,
-    },
-    {
-      label: 'Straight across',
-      formula: '√(short² + long²)',
-      numbers: `√${sum}`,
-      result: writer.length(output('diagonal')),
-      output: 'diagonal',
-    },
-  ]
-}
-
-const unitOf = (outputs: Values) => numberOf(outputs, 'unit')
-const shortOf = (values: Values) => Math.min(numberOf(values, 'sideA'), numberOf(values, 'sideB'))
-const longOf = (values: Values) => Math.max(numberOf(values, 'sideA'), numberOf(values, 'sideB'))
 
 /**
  * The 3-4-5 triangle: legs of 3 and 4 units make a right angle when the tape across reads 5.
@@ -128,92 +68,8 @@ export const square: Calculator = {
     { name: 'largestUnit', label: 'Biggest unit that fits', quantity: 'length' },
   ],
   compute,
-  steps,
-  slips: [
-    {
-      id: 'round-the-corner',
-      title: 'Went round the corner',
-      output: 'diagonal',
-      wrong: (_values, outputs) => 7 * unitOf(outputs),
-      sentence: 'That is the way round the corner, one leg after the other.',
-      wayBack:
-        'The tape goes straight across. Square each leg first, add the squares, then take the square root.',
-    },
-    {
-      id: 'no-root',
-      title: 'Forgot the root',
-      output: 'diagonal',
-      wrong: (_values, outputs, system) =>
-        (25 * unitOf(outputs) ** 2) / (system === 'metric' ? 0.001 : 0.0254),
-      sentence: 'That is the sum of the squares.',
-      wayBack: 'One step is left: take the square root.',
-    },
-    {
-      id: 'centimetres',
-      title: 'Answered in centimetres',
-      output: 'diagonal',
-      wrong: (_values, outputs, system) => (system === 'metric' ? unitOf(outputs) / 2 : undefined),
-      sentence: 'That looks like centimetres.',
-      wayBack: 'The field asks for millimetres: multiply by 10.',
-    },
-    {
-      id: 'feet-for-inches',
-      title: 'Answered in feet',
-      output: 'diagonal',
-      wrong: (_values, outputs, system) =>
-        system === 'imperial' ? (5 * unitOf(outputs)) / 12 : undefined,
-      sentence: 'That looks like feet without the foot mark.',
-      wayBack: 'A bare number is inches here: write the foot mark, or multiply by 12.',
-    },
-    {
-      id: 'outside-inside',
-      title: 'Outside of one form, inside of the other',
-      output: 'diagonal',
-      wrong: (_values, outputs) => Math.hypot(3 * unitOf(outputs) + BOARD, 4 * unitOf(outputs)),
-      sentence: 'That is off by one board: one leg is measured to the outside.',
-      wayBack: 'Measure both legs from the inside corner, along the inside faces.',
-    },
-    {
-      id: 'squares-subtracted',
-      title: 'Squares taken off each other',
-      output: 'diagonal',
-      wrong: (_values, outputs) => Math.sqrt(7) * unitOf(outputs),
-      sentence: 'That takes one square off the other.',
-      wayBack: 'The line across is the longest of the three: add the squares.',
-    },
-    {
-      id: 'legs-swapped-short',
-      title: 'Legs swapped',
-      output: 'legShort',
-      wrong: (_values, outputs) => 4 * unitOf(outputs),
-      sentence: 'That is the mark for the long board.',
-      wayBack: 'Three units go on the short board, four on the long one.',
-    },
-    {
-      id: 'legs-swapped-long',
-      title: 'Legs swapped',
-      output: 'legLong',
-      wrong: (_values, outputs) => 3 * unitOf(outputs),
-      sentence: 'That is the mark for the short board.',
-      wayBack: 'Three units go on the short board, four on the long one.',
-    },
-    {
-      id: 'short-by-four',
-      title: 'Short side divided by 4',
-      output: 'largestUnit',
-      wrong: (values) => shortOf(values) / 4,
-      sentence: 'That wants four units on the short side.',
-      wayBack: 'Three units go on the short side: divide it by 3, and the long one by 4.',
-    },
-    {
-      id: 'long-side-only',
-      title: 'Only the long side looked at',
-      output: 'largestUnit',
-      wrong: (values) => longOf(values) / 4,
-      sentence: 'That unit fits the long side only.',
-      wayBack: 'Three of it must fit the short side as well: take the smaller of the two.',
-    },
-  ],
+  steps: squareSteps,
+  slips: squareSlips,
   cautions: [
     {
       title: 'Before you drive a peg',

@@ -63,9 +63,10 @@ export function gradeCalculator(
   }
   const read = readAnswer(output, answer.answer, answer.units)
   if (!read.ok) return unreadVerdict(read.message, 'answer')
-  if (matches(read.value, right, definition)) return rightVerdict(answer.answer)
+  const said = withUnit(answer.answer, output, answer.units)
+  if (matches(read.value, right, definition)) return rightVerdict(said)
   const slip = findSlip(calculator, definition, run, read.value, answer.units)
-  return slip ? slipVerdict(slip) : wrongVerdict(answer.answer)
+  return slip ? slipVerdict(slip) : wrongVerdict(said)
 }
 
 type ReadAnswer = { ok: true; value: number | string } | { ok: false; message: string }
@@ -83,6 +84,13 @@ export function readAnswer(output: CalculatorOutput, text: string, system: UnitS
   return { ok: false, message: 'Pick one of the choices.' }
 }
 
+/** What was typed, a bare number with the unit it was taken in: 1500 is 1500 mm. */
+function withUnit(typed: string, output: CalculatorOutput, system: UnitSystem): string {
+  const unit = fieldUnit(output, system)
+  const isBare = unit !== '' && /^[\d\s.,+−-]+$/.test(typed)
+  return isBare ? `${typed.trim()}${unit === '°' ? '' : ' '}${unit}` : typed.trim()
+}
+
 const verdict = (outcome: Verdict['outcome'], message: string, wayBack: string): Verdict => ({
   right: outcome === 'right',
   outcome,
@@ -92,16 +100,16 @@ const verdict = (outcome: Verdict['outcome'], message: string, wayBack: string):
   field: null,
   questions: {},
 })
-const rightVerdict = (typed: string) =>
-  verdict('right', `${typed.trim()} is right.`, 'Put it in your field book, or carry on.')
+const rightVerdict = (said: string) =>
+  verdict('right', `${said} is right.`, 'Put it in your field book, or carry on.')
 const slipVerdict = (slip: Slip): Verdict => ({
   ...verdict('slip', slip.sentence, slip.wayBack),
   slip: { id: slip.id, title: slip.title },
 })
-const wrongVerdict = (typed: string) =>
+const wrongVerdict = (said: string) =>
   verdict(
     'wrong',
-    `${typed.trim()} does not fit.`,
+    `${said} does not fit.`,
     'Go through the worked steps again with your own numbers.',
   )
 

@@ -62,6 +62,15 @@ describe('gradeExercise on a calculator stop', () => {
     ).toEqual([true, true, false, false])
   })
 
+  it.each([
+    ['1500', '1500 mm is right.'],
+    ['1,5 m', '1,5 m is right.'],
+    ['1480', '1480 mm does not fit.'],
+    [`4' 10"`, `4' 10" does not fit.`],
+  ])('says back %s with the unit it was taken in', (typed, message) => {
+    expect(gradeTyped(exercise, typed).message).toBe(message)
+  })
+
   it('never tells the right number to who does not have it', () => {
     for (const answer of ['1400', '2100', '2 250 000', '150', 'x', '7 kg']) {
       const { message, wayBack, slip } = gradeTyped(exercise, answer)
