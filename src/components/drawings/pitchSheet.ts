@@ -128,7 +128,7 @@ export function drawPitchSheet(input: CalculatorSheetInput): CalculatorSheet | n
   const wedge = placeWedge(pitch.angle, narrow)
   const { left, right, top, base } = wedge
   const row = base + (narrow ? 26 : 32)
-  const drawing = new Drawing(narrow ? 326 : 720, row + 62, undefined, narrow ? 12 : 14)
+  const drawing = new Drawing(narrow ? 326 : 720, 0, undefined, narrow ? 12 : 14)
   drawing.coloured(() =>
     drawing.polygon(
       [
@@ -152,6 +152,7 @@ export function drawPitchSheet(input: CalculatorSheetInput): CalculatorSheet | n
   const lines = narrow
     ? [ways.slice(0, 3).join('  ·  '), ways.slice(3).join('')]
     : [ways.join('  ·  ')]
+  drawing.height = row + 20 + 18 * lines.filter(Boolean).length
   lines.forEach((line, index) =>
     drawing.text(drawing.width / 2, row + 34 + index * 18, line, 'vsub', 'middle'),
   )
