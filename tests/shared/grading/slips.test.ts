@@ -300,6 +300,12 @@ describe('every slip', () => {
     expect(gradeTyped(exerciseOf(one), '9', 'metric', texts).outcome).toBe('wrong')
   })
 
+  it('is silent where it comes within the tolerance of the right number', () => {
+    // The mean of the readings, 2823.25, lies 0.13 mm from the right 2823.12; 2823.4 is within 0.2 mm of the mean alone.
+    const one = { ...expected, texts: form.texts, slip: 'mean-taken', typed: '2823.4' }
+    expect(gradeTyped(exerciseOf(one), one.typed, 'metric', one.texts).outcome).toBe('wrong')
+  })
+
   it('is named only where the stop names it', () => {
     const exercise = buildCalculatorExercise({ slips: ['no-root'] })
     expect(gradeTyped(exercise, '2100').outcome).toBe('wrong')
