@@ -38,16 +38,12 @@ export const listBenchStaff = (courseId: number, on: Executor = db) =>
     .orderBy(courseStaff.role, courseStaff.id)
 
 /**
- * The number after the highest sheet in the register. Whoever asks next waits until this
- * transaction has ended, so that no two courses get the same.
+ * The number after the highest sheet in the register. The first course stands for the whole register:
+ * whoever asks next waits for it until this transaction has ended, so that no two get the same.
  */
 export async function takeSheetNumber(tx: Transaction): Promise<number> {
-  const [row] = await tx
-    .select({ last: courses.sheetNumber })
-    .from(courses)
-    .orderBy(desc(courses.sheetNumber))
-    .limit(1)
-    .for('update')
+  await tx.select({ id: courses.id }).from(courses).orderBy(courses.id).limit(1).for('update')
+  const [row] = await tx.select({ last: max(courses.sheetNumber) }).from(courses)
   return (row?.last ?? 0) + 1
 }
 
@@ -104,7 +100,7 @@ export function listStaffedCourses(
   const newest = db
     .select({
       courseId: courseRevisions.courseId,
-      number: max(courseRevisions.number).as('number'),
+      number: max(courseRevisions.number).as('newest_number'),
     })
     .from(courseRevisions)
     .groupBy(courseRevisions.courseId)

@@ -25,11 +25,14 @@ const refuse = (reason: string): Judgement => ({
 const named = (text: string | undefined) =>
   (text ?? 'unknown').replace(/[^\w.,-]/g, '').slice(0, 40)
 
+const cannotBeRead = 'Its pictures cannot be read: the file is damaged or was cut off.'
+
 function judgeCodecs(isMp4: boolean, picture: ProbedStream, sounds: ProbedStream[]) {
   const codec = picture.codec_name ?? ''
   if (!(isMp4 ? mp4Pictures : webmPictures).has(codec)) {
     return `Its pictures are stored as ${named(codec)}, which not every browser shows.`
   }
+  if (picture.pix_fmt === undefined) return cannotBeRead
   if (codec === 'h264' && !h264Formats.has(picture.pix_fmt ?? '')) {
     return `Its pictures are H.264 of the kind ${named(picture.pix_fmt)}, which browsers do not show.`
   }
@@ -83,5 +86,4 @@ export function judgeVideo(probed: Probed | null): Judgement {
 }
 
 /** Said of a file that looks like a video but whose pictures cannot be read. */
-export const unreadablePicture = (): Judgement =>
-  refuse('Its pictures cannot be read: the file is damaged or was cut off.')
+export const unreadablePicture = (): Judgement => refuse(cannotBeRead)
