@@ -149,10 +149,9 @@ export function drawPitchSheet(input: CalculatorSheetInput): CalculatorSheet | n
       level: true,
     })
   const ways = otherWays(input)
-  const lines = narrow
-    ? [ways.slice(0, 3).join('  ·  '), ways.slice(3).join('')]
-    : [ways.join('  ·  ')]
-  drawing.height = row + 20 + 18 * lines.filter(Boolean).length
+  const groups = narrow ? [ways.slice(0, 3), ways.slice(3)] : [ways]
+  const lines = groups.map((group) => group.join('  ·  ')).filter(Boolean)
+  drawing.height = row + 26 + 18 * lines.length
   lines.forEach((line, index) =>
     drawing.text(drawing.width / 2, row + 34 + index * 18, line, 'vsub', 'middle'),
   )

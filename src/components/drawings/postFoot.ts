@@ -79,7 +79,8 @@ export function drawPostFoot(size: 'wide' | 'narrow', figure: RoundFigure): Draw
   const column = isWide ? 70 : 26
   dimensionAcross(drawing, [-225, 225], -430, isWide ? 604 : 282, figure(450, 18))
   dimensionUp(drawing, [-330, 20], -225, column, figure(350, 14))
-  const post = [`post ${figure(90, 3.5)} × ${figure(90, 3.5)}`]
+  const section = `${figure(90, 3.5)} × ${figure(90, 3.5)}`
+  const post = isWide ? [`post ${section}`] : ['post', section]
   const foot = ['post foot keeps', 'end grain dry']
   if (!isWide) {
     drawLeader(drawing, [30, 200], [222, 24], post)
