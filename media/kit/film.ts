@@ -7,7 +7,7 @@ import { FRAME_RATE, SAMPLE_RATE } from './timeline'
 export const WIDTH = 1280
 export const HEIGHT = 720
 const LOUDNESS = -16
-const LIMIT_DB = -2
+const LIMIT_DB = -3.5
 
 /** Writes the narration as a mono wav with every sentence at its place. */
 export function writeNarration(file: string, timeline: Timeline, speech: Int16Array[]): void {
@@ -55,7 +55,7 @@ function measureLoudness(narration: string, gainDb: number): number {
 }
 
 /** The gain in dB that brings the narration to the loudness; the limiter takes some away, hence the second look. */
-export function findGain(narration: string): number {
+function findGain(narration: string): number {
   let gainDb = 0
   for (let look = 0; look < 3; look++) gainDb += LOUDNESS - measureLoudness(narration, gainDb)
   return gainDb

@@ -2,8 +2,8 @@ import { seeded } from './motion'
 import type { Ctx, Point } from './pen'
 import { box, colour, line, pen, polygon } from './pen'
 
-export const BOARD = 38
-export const PEG = 45
+const BOARD = 38
+const PEG = 45
 /** The inside of the demonstration's form, and where its pegs stand along the boards. */
 export const FORM = { length: 2600, width: 1100 } as const
 export const PEGS = { long: [150, 890, 1665, 2405], short: [160, 960] } as const

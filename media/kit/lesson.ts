@@ -2,7 +2,7 @@ import type { SKRSContext2D } from '@napi-rs/canvas'
 import type { Timeline } from './timeline'
 
 /** A moment at which the video waits for an exercise. */
-export interface StopMark {
+interface StopMark {
   key: string
   name: string
 }

@@ -39,7 +39,7 @@ export const colour = {
 export const pen = { fine: 1.5, part: 2.25, outline: 3.5 } as const
 
 const WEIGHTS = [500, 600, 700, 800, 900] as const
-export type Weight = (typeof WEIGHTS)[number]
+type Weight = (typeof WEIGHTS)[number]
 
 /** Every weight goes under a family name of its own: the canvas does not choose among weights of one family. */
 export function registerFonts(): void {
@@ -50,7 +50,7 @@ export function registerFonts(): void {
   }
 }
 
-export interface Stroke {
+interface Stroke {
   stroke?: string
   fill?: string
   width?: number
@@ -139,7 +139,7 @@ function drawPath(ctx: Ctx, path: string): void {
   }
 }
 
-export interface Lettering {
+interface Lettering {
   size?: number
   weight?: Weight
   fill?: string

@@ -4,7 +4,7 @@ import { box, colour, disc, line, pen, polygon, shape } from './pen'
 const ink = { stroke: colour.ink, width: pen.part }
 
 /** Drawn 72 pixels wide round (`x`, `y`), one pen, one material. */
-export type Pictogram = (ctx: Ctx, x: number, y: number) => void
+type Pictogram = (ctx: Ctx, x: number, y: number) => void
 
 export const buriedService: Pictogram = (ctx, x, y) => {
   box(ctx, x - 36, y - 4, 72, 36, { fill: colour.earth })
@@ -86,16 +86,6 @@ export const prop: Pictogram = (ctx, x, y) => {
     { fill: colour.timber, ...ink },
   )
   box(ctx, x + 13, y - 18, 8, 48, { fill: colour.timber3, ...ink })
-}
-
-export const ladder: Pictogram = (ctx, x, y) => {
-  line(ctx, [x - 34, y + 32], [x + 34, y + 32], { width: pen.outline })
-  for (const side of [-1, 1])
-    line(ctx, [x + side * 6, y - 32], [x + side * 24, y + 32], { width: pen.outline })
-  for (const step of [-14, 4, 20]) {
-    const half = 8 + (step + 30) * 0.26
-    line(ctx, [x - half, y + step], [x + half, y + step], ink)
-  }
 }
 
 export const localCode: Pictogram = (ctx, x, y) => {

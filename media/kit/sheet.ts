@@ -3,8 +3,8 @@ import type { Ctx } from './pen'
 import { box, colour, faded, line, pen, polygon, write } from './pen'
 
 /** The drawing's frame; what is under y = 600 stays free for the captions. */
-export const DRAWING = { x: 56, y: 112, w: 784, h: 480 } as const
-export const BLOCK = { x: 864, y: 112, w: 360, h: 480 } as const
+const DRAWING = { x: 56, y: 112, w: 784, h: 480 } as const
+const BLOCK = { x: 864, y: 112, w: 360, h: 480 } as const
 
 export function paper(ctx: Ctx): void {
   box(ctx, 0, 0, 1280, 720, { fill: colour.paper })
@@ -31,7 +31,7 @@ export function drawingSheet(ctx: Ctx, title: string, paint: () => void): void {
   box(ctx, x, y, w, h, { stroke: colour.ink, width: pen.part })
 }
 
-export interface Row {
+interface Row {
   label: string
   value: string
   /** Seconds at which the value is written. */
@@ -101,7 +101,7 @@ export function nameCard(
 }
 
 /** The sign that stands before every caution. */
-export function cautionSign(ctx: Ctx, x: number, y: number, size: number): void {
+function cautionSign(ctx: Ctx, x: number, y: number, size: number): void {
   const half = size / 2
   polygon(
     ctx,

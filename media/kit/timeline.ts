@@ -4,8 +4,8 @@ import type { Lesson, Line } from './lesson'
 export const SAMPLE_RATE = 32_000
 export const FRAME_RATE = 30
 
-const PAUSE = 0.3
-const STEP_PAUSE = 0.45
+const PAUSE = 0.5
+const STEP_PAUSE = 0.6
 /** After a question the picture stands still; the video waits inside this quiet. */
 const STOP_PAUSE = 2
 const STOP_DELAY = 0.5
@@ -19,12 +19,12 @@ export interface Cue {
   endMs: number
   text: string
 }
-export interface Stop {
+interface Stop {
   key: string
   name: string
   atMs: number
 }
-export interface Chapter {
+interface Chapter {
   startMs: number
   endMs: number
   title: string
