@@ -8,10 +8,11 @@ export function useFenceThread(questionId: () => number | null) {
   const { data, problem, again } = useLoad(questionId, async (id) =>
     id === null ? null : fence.openThread(id),
   )
-  const thread = computed(() => {
-    const latest = data.value && (fence.threadOf(data.value.id) ?? data.value)
-    return latest?.isDeleted ? null : latest
+  const latest = computed(() => {
+    const id = questionId()
+    return id === null ? null : (fence.threadOf(id) ?? data.value)
   })
-  const isGone = computed(() => data.value !== null && thread.value === null)
+  const isGone = computed(() => latest.value?.isDeleted === true)
+  const thread = computed(() => (isGone.value ? null : latest.value))
   return { thread, isGone, problem, again }
 }
