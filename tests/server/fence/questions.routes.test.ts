@@ -1,12 +1,17 @@
 import { randomUUID } from 'node:crypto'
 import { eq } from 'drizzle-orm'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest'
 import { db } from '../../../server/db/client'
 import { users } from '../../../server/db/schema'
 import { problemSchema } from '../../../shared/contracts/errors'
 import { threadSchema } from '../../../shared/contracts/fence'
 import { startTestApp, type Agent, type TestApp } from '../../support/app'
 import { ask, createScene, readEvents, readThread, readThreads, reply } from './fenceScene'
+
+// The limits are tested as they are; the configuration is read once, by the imports.
+vi.hoisted(() => {
+  process.env['RATE_LIMIT_FACTOR'] = '1'
+})
 
 let app: TestApp
 beforeAll(async () => {
