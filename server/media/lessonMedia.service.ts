@@ -1,4 +1,4 @@
-import type { BenchLesson } from '../../shared/contracts/courses'
+import type { BenchLesson } from '../../shared/contracts/benchCourses'
 import type { Executor } from '../db/client'
 import { listTracks, type MeasuredTrack } from './captionTracks.queries'
 import { listNewestVideos, listVideos, type VideoRow } from './videos.queries'

@@ -8,8 +8,15 @@ export const mediaRouter = Router()
 const videoParams = z.object({ videoId: z.coerce.number().int().positive() })
 const viewerOf = ({ actor, session }: Request) => ({ actor, kit: session.kit ?? {} })
 
+/** The last bytes of a file that has fewer are all of it (RFC 9110, 14.1.2); the library refuses them. */
+function clampSuffix(request: Request, bytes: number) {
+  const suffix = /^bytes=-(\d+)$/.exec(request.headers.range ?? '')?.[1]
+  if (suffix !== undefined && Number(suffix) > bytes) request.headers.range = 'bytes=0-'
+}
+
 /** Sends a file or the part that is asked for; what was aborted by the browser is no error. */
-function sendStored(file: StoredFile, response: Response, next: NextFunction) {
+function sendStored(file: StoredFile, request: Request, response: Response, next: NextFunction) {
+  clampSuffix(request, file.bytes)
   response.setHeader('Content-Type', file.contentType)
   response.setHeader('Cache-Control', 'private, max-age=3600')
   response.setHeader('ETag', `"${file.tag}"`)
@@ -27,10 +34,10 @@ function sendStored(file: StoredFile, response: Response, next: NextFunction) {
 
 mediaRouter.get('/media/videos/:videoId/file', async (request, response, next) => {
   const { videoId } = readParams(request, videoParams)
-  sendStored(await findVideoFile(videoId, viewerOf(request)), response, next)
+  sendStored(await findVideoFile(videoId, viewerOf(request)), request, response, next)
 })
 
 mediaRouter.get('/media/videos/:videoId/poster', async (request, response, next) => {
   const { videoId } = readParams(request, videoParams)
-  sendStored(await findPosterFile(videoId, viewerOf(request)), response, next)
+  sendStored(await findPosterFile(videoId, viewerOf(request)), request, response, next)
 })

@@ -16,6 +16,7 @@ export interface StoredFile {
   root: string
   name: string
   contentType: string
+  bytes: number
   /** Changes whenever the bytes do. */
   tag: string
 }
@@ -45,8 +46,9 @@ export async function checkMaySee(
 }
 
 async function locate(key: string, contentType: string, tag: string): Promise<StoredFile> {
-  if (!(await mediaStorage.stat(key))) throw notFound('file')
-  return { ...mediaStorage.locate(key), contentType, tag }
+  const found = await mediaStorage.stat(key)
+  if (!found) throw notFound('file')
+  return { ...mediaStorage.locate(key), bytes: found.bytes, contentType, tag }
 }
 
 /** The file of a video that a person may watch now. */

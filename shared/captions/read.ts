@@ -11,6 +11,10 @@ export type ReadCaptions =
   | { ok: false; errors: CaptionError[] }
 
 const mostListed = 200
+/** Findings of the parser that are looked at; a hostile file brings forth hundreds of thousands. */
+const mostFindings = 1000
+/** In a whole file; more would keep the parser busy for seconds. */
+const mostTags = 40_000
 const longest = { cueId: 190, settings: 255, text: 2000, preamble: 20_000 }
 const latestMs = 86_400_000
 
@@ -44,7 +48,7 @@ function placeTextError({ line, column }: ParserError, cues: CueBlock[]) {
 function sortFindings(lines: string[], cues: CueBlock[]) {
   const errors: CaptionError[] = []
   const marks: CaptionError[] = []
-  for (const found of parseStrictly(lines.join('\n'))) {
+  for (const found of parseStrictly(lines.join('\n')).slice(0, mostFindings)) {
     const isInText = textErrors.test(found.message) || (lines[found.line - 1] ?? '') === ''
     const place = isInText
       ? placeTextError(found, cues)
@@ -76,6 +80,9 @@ function checkSize(lines: string[], { cues, preamble }: ScannedCaptions): Captio
     return [
       at(1, `What stands above the first caption has more than ${longest.preamble} characters.`),
     ]
+  }
+  if (lines.reduce((sum, line) => sum + line.split('<').length - 1, 0) > mostTags) {
+    return [at(1, `The file has more than ${mostTags} tags. Take out those that style the words.`)]
   }
   const huge = lines.findIndex((line) => line.length > longest.text * 2)
   if (huge >= 0) return [at(huge + 1, `This line has more than ${longest.text * 2} characters.`)]

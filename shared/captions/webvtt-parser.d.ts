@@ -13,5 +13,5 @@ declare module 'webvtt-parser' {
   const parser: {
     WebVTTParser: new () => { parse: (text: string, mode: string) => ParsedCaptions }
   }
-  export default parser
+  export = parser
 }

@@ -1,10 +1,10 @@
 import { spawnSync } from 'node:child_process'
-import { mkdtempSync, readFileSync } from 'node:fs'
-import { tmpdir } from 'node:os'
+import { mkdirSync, readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { config } from '../../server/config'
 
-const folder = mkdtempSync(join(tmpdir(), 'good-footing-films-'))
+/** Goes with the test file's other data. */
+const folder = join(config.dataDir, 'films')
 const picture = ['-f', 'lavfi', '-i', 'testsrc=duration=2:size=320x180:rate=10']
 const sound = ['-f', 'lavfi', '-i', 'sine=frequency=440:duration=2']
 const h264 = ['-c:v', 'libx264', '-preset', 'ultrafast', '-pix_fmt', 'yuv420p']
@@ -28,6 +28,7 @@ const made = new Map<Film, string>()
 export function filmPath(name: Film): string {
   const known = made.get(name)
   if (known) return known
+  mkdirSync(folder, { recursive: true })
   const path = join(folder, name)
   const { status, stderr } = spawnSync(config.ffmpegPath, [
     '-v',

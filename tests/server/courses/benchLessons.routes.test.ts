@@ -6,7 +6,7 @@ import {
   benchCourseSchema,
   benchLessonSchema,
   extendedBenchCourseSchema,
-} from '../../../shared/contracts/courses'
+} from '../../../shared/contracts/benchCourses'
 import { startTestApp, type TestApp } from '../../support/app'
 import {
   addHelper,

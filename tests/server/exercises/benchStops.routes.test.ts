@@ -2,7 +2,7 @@ import { eq } from 'drizzle-orm'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { db } from '../../../server/db/client'
 import { exercises, quizQuestions, stops } from '../../../server/db/schema'
-import { benchStopSchema } from '../../../shared/contracts/courses'
+import { benchStopSchema } from '../../../shared/contracts/benchCourses'
 import type { Exercise } from '../../../shared/contracts/exercises'
 import { startTestApp, type TestApp } from '../../support/app'
 import {
@@ -22,6 +22,9 @@ beforeAll(async () => {
   app = await startTestApp()
 })
 afterAll(() => app.close())
+
+const fieldsOf = (body: unknown) =>
+  (body as { errors: { field: string }[] }).errors.map(({ field }) => field)
 
 async function setUp() {
   const owner = await createInstructor()
@@ -116,11 +119,7 @@ describe('POST bench/lessons/:lessonId/stops', () => {
       .post(listPath)
       .send({ name: '', atMs: -1, isRequired: 'yes' })
       .expect(400)
-    expect(bad.body.errors.map(({ field }: { field: string }) => field)).toEqual([
-      'name',
-      'atMs',
-      'isRequired',
-    ])
+    expect(fieldsOf(bad.body)).toEqual(['name', 'atMs', 'isRequired'])
     await agent.post('/api/bench/lessons/999999/stops').send(newStop).expect(404)
   })
 })

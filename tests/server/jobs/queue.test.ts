@@ -18,9 +18,13 @@ const onlyJob = async () => (await db.select().from(jobs))[0]!
 /** Lets what waits for its time be due. */
 const hurry = () => db.update(jobs).set({ runAfter: sql`utc_timestamp(3)` })
 
+const note = (ran: number[], n: number) => {
+  ran.push(n)
+  return Promise.resolve()
+}
 const counting = (
   run: (n: number, signal: AbortSignal) => Promise<void>,
-  more: Partial<Job> = {},
+  more: Pick<Job, 'giveUp'> = {},
 ) =>
   defineJob({
     kind: 'count',
@@ -33,7 +37,7 @@ describe('the queue', () => {
   it('runs what is waiting, each once, in turn', async () => {
     const ran: number[] = []
     for (const n of [1, 2, 3]) await insertJob('count', { n })
-    startJobs([counting((n) => Promise.resolve(void ran.push(n)))])
+    startJobs([counting((n) => note(ran, n))])
     await expect.poll(() => ran.length, { timeout: 5000 }).toBe(3)
     await stopJobs()
     expect(ran.sort()).toEqual([1, 2, 3])
@@ -42,7 +46,7 @@ describe('the queue', () => {
 
   it('hears the bell', async () => {
     const ran: number[] = []
-    startJobs([counting((n) => Promise.resolve(void ran.push(n)))])
+    startJobs([counting((n) => note(ran, n))])
     await insertJob('count', { n: 7 })
     ringBell()
     await expect.poll(() => ran, { timeout: 5000 }).toEqual([7])
@@ -70,7 +74,10 @@ describe('the queue', () => {
   it('tries again after longer and longer pauses, then gives up', async () => {
     let given = 0
     const job = counting(() => Promise.reject(new Error('no luck')), {
-      giveUp: () => Promise.resolve(void given++),
+      giveUp: () => {
+        given++
+        return Promise.resolve()
+      },
     })
     await insertJob('count', { n: 1 })
     const pauses: number[] = []
@@ -111,7 +118,10 @@ describe('the queue', () => {
       kind: 'sweep',
       payload: z.object({}),
       everyMs: 3600_000,
-      run: () => Promise.resolve(void runs++),
+      run: () => {
+        runs++
+        return Promise.resolve()
+      },
     })
     startJobs([sweep])
     await expect.poll(() => runs, { timeout: 5000 }).toBe(1)

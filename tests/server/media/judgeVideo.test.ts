@@ -1,14 +1,15 @@
 import { spawnSync } from 'node:child_process'
-import { copyFileSync, mkdtempSync, writeFileSync } from 'node:fs'
-import { tmpdir } from 'node:os'
+import { copyFileSync, mkdirSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { describe, expect, it } from 'vitest'
+import { config } from '../../../server/config'
 import { judgeVideo } from '../../../server/media/judgeVideo'
 import { probeFile } from '../../../server/media/probe'
 import { filmPath, type Film } from '../../support/films'
 
 const judge = async (path: string) => judgeVideo(await probeFile(path))
-const folder = mkdtempSync(join(tmpdir(), 'good-footing-judge-'))
+const folder = join(config.dataDir, 'judged')
+mkdirSync(folder, { recursive: true })
 function write(name: string, content: string) {
   const path = join(folder, name)
   writeFileSync(path, content)

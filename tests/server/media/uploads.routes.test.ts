@@ -1,33 +1,18 @@
-import { existsSync } from 'node:fs'
-import { appendFile, readdir, utimes } from 'node:fs/promises'
-import { request as httpRequest, type IncomingHttpHeaders } from 'node:http'
+import { readdir, utimes } from 'node:fs/promises'
 import { join } from 'node:path'
-import { eq } from 'drizzle-orm'
-import express from 'express'
-import type { AddressInfo } from 'node:net'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { config } from '../../../server/config'
-import { db } from '../../../server/db/client'
-import { jobs, lessons, videos } from '../../../server/db/schema'
-import { startJobs, stopJobs } from '../../../server/jobs/queue'
-import { createUploadsRouter } from '../../../server/media/uploads.routes'
-import { createUploads, sweepUploads } from '../../../server/media/uploads.service'
-import { errorHandler } from '../../../server/middleware/errorHandler'
-import { benchLessonSchema } from '../../../shared/contracts/courses'
+import { benchLessonSchema } from '../../../shared/contracts/benchCourses'
 import { maxVideoBytes } from '../../../shared/contracts/media'
 import { createSessionCookie, startTestApp, type TestApp } from '../../support/app'
 import {
   addHelper,
-  createCaptions,
-  createCourse,
   createInstructor,
   createIssuedCourse,
-  createLesson,
-  createStage,
   createUser,
-  createVideo,
 } from '../../support/factories'
 import { readFilm } from '../../support/films'
+import { ask, codeOf, metadata, setUpUpload, waitUntilChecked, type Answer } from './uploadScene'
 
 let app: TestApp
 beforeAll(async () => {
@@ -35,120 +20,7 @@ beforeAll(async () => {
 })
 afterAll(() => app.close())
 
-interface Answer {
-  status: number
-  headers: IncomingHttpHeaders
-  body: string
-}
-interface Sending {
-  method: string
-  path?: string
-  cookie?: string
-  headers?: Record<string, string>
-  body?: Buffer
-  /** Cut the line after so many bytes of the body. */
-  cutAfter?: number
-  base?: string
-}
-
-/** Speaks tus over a socket of its own, and can cut it. */
-function send({ method, path = '', cookie, headers = {}, body, cutAfter, base }: Sending) {
-  return new Promise<Answer | 'cut'>((resolve, reject) => {
-    const origin = base ?? app.url
-    const request = httpRequest(`${origin}/api/uploads${path}`, {
-      method,
-      headers: {
-        Origin: origin,
-        'Tus-Resumable': '1.0.0',
-        ...(cookie ? { Cookie: cookie } : {}),
-        ...(body ? { 'Content-Length': String(body.length) } : {}),
-        ...headers,
-      },
-    })
-    request.on('error', (error) => (cutAfter === undefined ? reject(error) : resolve('cut')))
-    request.on('response', (response) => {
-      const parts: Buffer[] = []
-      response.on('data', (part: Buffer) => parts.push(part))
-      response.on('end', () =>
-        resolve({
-          status: response.statusCode ?? 0,
-          headers: response.headers,
-          body: Buffer.concat(parts).toString(),
-        }),
-      )
-    })
-    if (cutAfter === undefined) request.end(body)
-    else request.write(body!.subarray(0, cutAfter), () => setTimeout(() => request.destroy(), 150))
-  })
-}
-async function ask(sending: Sending): Promise<Answer> {
-  const answer = await send(sending)
-  if (answer === 'cut') throw new Error('the line was cut')
-  return answer
-}
-const codeOf = ({ body }: Answer) => (JSON.parse(body) as { code: string }).code
-
-const metadata = (values: Record<string, string>) =>
-  Object.entries(values)
-    .map(([name, value]) => `${name} ${Buffer.from(value).toString('base64')}`)
-    .join(',')
-
-async function setUp() {
-  const owner = await createInstructor()
-  const course = await createCourse({ owner })
-  const lesson = await createLesson(await createStage(course.revisionId))
-  const cookie = await createSessionCookie(owner.id)
-  const begin = (length: number, values: Partial<Sending> = {}) =>
-    ask({
-      method: 'POST',
-      cookie,
-      ...values,
-      headers: {
-        'Upload-Length': String(length),
-        'Upload-Metadata': metadata({
-          lessonId: String(lesson.id),
-          filename: 'Säge.mp4',
-          filetype: 'video/mp4',
-        }),
-        ...values.headers,
-      },
-    })
-  const open = async (length: number) => {
-    const { headers } = await begin(length)
-    return (headers.location ?? '').replace('/api/uploads', '')
-  }
-  const patch = (path: string, offset: number, body: Buffer, values: Partial<Sending> = {}) =>
-    send({
-      method: 'PATCH',
-      path,
-      cookie,
-      body,
-      ...values,
-      headers: {
-        'Upload-Offset': String(offset),
-        'Content-Type': 'application/offset+octet-stream',
-        ...values.headers,
-      },
-    })
-  const head = (path: string, who = cookie) => ask({ method: 'HEAD', path, cookie: who })
-  const findVideo = async () =>
-    (await db.select().from(videos).where(eq(videos.lessonKey, lesson.key)))[0]
-  return { owner, course, lesson, cookie, begin, open, patch, head, findVideo }
-}
-
-async function waitUntilChecked(lessonKey: string) {
-  startJobs()
-  try {
-    for (;;) {
-      const rows = await db.select().from(videos).where(eq(videos.lessonKey, lessonKey))
-      const open = rows.some(({ state }) => state === 'checking')
-      if (!open) return rows.at(-1)!
-      await new Promise((resolve) => setTimeout(resolve, 100))
-    }
-  } finally {
-    await stopJobs()
-  }
-}
+const setUp = () => setUpUpload(app)
 
 describe('uploads', () => {
   it('take a film in parts, check it, make a poster and show it in the draft', async () => {
@@ -235,70 +107,13 @@ describe('uploads', () => {
     })
     const other = await createSessionCookie((await createInstructor()).id)
     expect((await head(path, other)).status).toBe(404)
-    expect((await ask({ method: 'DELETE', path, cookie })).status).toBe(404)
-  })
-
-  it('take over what was whole when the server was killed', async () => {
-    const { open, patch, findVideo } = await setUp()
-    const path = await open(500)
-    await patch(path, 0, Buffer.alloc(499))
-    await appendFile(join(config.dataDir, 'uploads', path.slice(1)), Buffer.alloc(1))
-    expect(await findVideo()).toBeUndefined()
-    await sweepUploads()
-    expect(await findVideo()).toMatchObject({ bytes: 500, state: 'checking' })
-  })
-
-  it('refuse what is not a video in a sentence, whatever its name, and keep the one before', async () => {
-    const { owner, course, lesson, open, patch } = await setUp()
-    const before = await createVideo(course.id, lesson)
-    const text = Buffer.from('Just a few words, called film.mp4.')
-    const path = await open(text.length)
-    await patch(path, 0, text)
-    const checked = await waitUntilChecked(lesson.key)
-    expect(checked).toMatchObject({
-      state: 'refused',
-      refusal: expect.stringMatching(/not a video/) as string,
-    })
-    const [row] = await db.select().from(lessons).where(eq(lessons.id, lesson.id))
-    expect(row!.videoId).toBe(before.id)
-    expect(existsSync(join(config.dataDir, 'media', checked.storageKey))).toBe(false)
-    const agent = await app.asUser(owner)
-    const seen = benchLessonSchema.parse((await agent.get(`/api/bench/lessons/${lesson.id}`)).body)
-    expect(seen.video?.id).toBe(before.id)
-    expect(seen.refusedVideo?.refusal).toMatch(/not a video/)
-    await agent.get(`/api/media/videos/${checked.id}/file`).expect(404)
-  })
-
-  it('refuse a film that was cut off before its pictures', async () => {
-    const { lesson, open, patch } = await setUp()
-    const film = readFilm('plain.mp4')
-    const cut = Buffer.concat([film.subarray(0, film.indexOf('mdat') + 8), Buffer.alloc(4000)])
-    const path = await open(cut.length)
-    await patch(path, 0, cut)
-    expect(await waitUntilChecked(lesson.key)).toMatchObject({
-      state: 'refused',
-      refusal: expect.stringMatching(/damaged|cut off|not a video/) as string,
-    })
-  })
-
-  it('carry the captions over to a new cut', async () => {
-    const { owner, course, lesson, open, patch } = await setUp()
-    await createCaptions((await createVideo(course.id, lesson)).id, ['One.', 'Two.'])
-    const film = readFilm('silent.mp4')
-    const path = await open(film.length)
-    await patch(path, 0, film)
-    const checked = await waitUntilChecked(lesson.key)
-    const agent = await app.asUser(owner)
-    const seen = benchLessonSchema.parse((await agent.get(`/api/bench/lessons/${lesson.id}`)).body)
-    expect(seen.video?.id).toBe(checked.id)
-    expect(seen.captions).toMatchObject([{ language: 'en', cues: 2, isOriginal: true }])
-    expect(seen.snags.map(({ code }) => code)).toContain('captions-beyond-end')
+    expect((await ask({ base: app.url, method: 'DELETE', path, cookie })).status).toBe(404)
   })
 
   it('can be given up', async () => {
     const { open, head, cookie } = await setUp()
     const path = await open(1000)
-    expect((await ask({ method: 'DELETE', path, cookie })).status).toBe(204)
+    expect((await ask({ base: app.url, method: 'DELETE', path, cookie })).status).toBe(204)
     expect((await head(path)).status).toBe(404)
     expect((await readdir(join(config.dataDir, 'uploads'))).join()).not.toContain(path.slice(1))
   })
@@ -313,9 +128,9 @@ describe('uploads', () => {
       const cookie = await createSessionCookie(person.id)
       expect((await head(path, cookie)).status).toBe(404)
       expect(await patch(path, 0, Buffer.alloc(10), { cookie })).toMatchObject({ status: 404 })
-      expect((await ask({ method: 'DELETE', path, cookie })).status).toBe(404)
+      expect((await ask({ base: app.url, method: 'DELETE', path, cookie })).status).toBe(404)
     }
-    expect((await ask({ method: 'HEAD', path })).status).toBe(401)
+    expect((await ask({ base: app.url, method: 'HEAD', path })).status).toBe(401)
     expect((await head(path)).headers['upload-offset']).toBe('0')
   })
 
@@ -363,9 +178,9 @@ describe('uploads', () => {
       await patch(path, 0, Buffer.alloc(10), { headers: { 'Upload-Offset': 'x' } }),
     ).toMatchObject({ status: 400 })
     expect(await patch(path, 0, Buffer.alloc(101))).toMatchObject({ status: 413 })
-    expect((await ask({ method: 'GET', path, cookie })).status).toBe(404)
+    expect((await ask({ base: app.url, method: 'GET', path, cookie })).status).toBe(404)
     for (const strange of ['/..%2F..%2Fsession-secret', '/%00', '/x']) {
-      expect((await ask({ method: 'HEAD', path: strange, cookie })).status).toBe(404)
+      expect((await ask({ base: app.url, method: 'HEAD', path: strange, cookie })).status).toBe(404)
     }
   })
 
@@ -378,47 +193,5 @@ describe('uploads', () => {
     await utimes(join(config.dataDir, 'uploads', path.slice(1)), idle, idle)
     expect((await begin(100)).status).toBe(201)
     expect((await head(path)).status).toBe(404)
-  })
-})
-
-describe('a disk that is full', () => {
-  async function startWith(findFree: () => Promise<number>) {
-    const small = express()
-    small.use('/api', createUploadsRouter(createUploads({ findFree })))
-    small.use(errorHandler)
-    const server = small.listen(0, '127.0.0.1')
-    await new Promise((resolve) => server.once('listening', resolve))
-    return { server, base: `http://127.0.0.1:${(server.address() as AddressInfo).port}` }
-  }
-
-  it('is said before a byte is sent, and nothing is kept', async () => {
-    const { begin } = await setUp()
-    const before = await readdir(join(config.dataDir, 'uploads'))
-    const { server, base } = await startWith(() => Promise.resolve(600 * 1024 ** 2))
-    const answer = await begin(200 * 1024 ** 2, { base })
-    expect([answer.status, codeOf(answer)]).toEqual([507, 'disk-full'])
-    expect(await readdir(join(config.dataDir, 'uploads'))).toEqual(before)
-    server.close()
-  })
-
-  it('is said to a part as well, and what has come in is kept', async () => {
-    const { open, patch, head } = await setUp()
-    const path = await open(1000)
-    await patch(path, 0, Buffer.alloc(300))
-    const { server, base } = await startWith(() => Promise.resolve(10))
-    expect(await patch(path, 300, Buffer.alloc(700), { base })).toMatchObject({ status: 507 })
-    expect((await head(path)).headers['upload-offset']).toBe('300')
-    server.close()
-  })
-})
-
-describe('the job of an upload', () => {
-  it('is there with the video, and once', async () => {
-    const { open, patch, findVideo } = await setUp()
-    const path = await open(500)
-    await patch(path, 0, Buffer.alloc(500))
-    const video = await findVideo()
-    const rows = await db.select().from(jobs).where(eq(jobs.kind, 'probe-video'))
-    expect(rows.filter(({ payload }) => payload['videoId'] === video!.id)).toHaveLength(1)
   })
 })
