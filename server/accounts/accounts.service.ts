@@ -43,7 +43,9 @@ export async function signUp(input: SignUp): Promise<number> {
   } catch (error) {
     if (!isDuplicate(error)) throw error
     throw new AppError(409, 'address-taken', 'This address has an account already.', {
-      errors: [{ field: 'email', message: 'This address has an account already. Sign in instead.' }],
+      errors: [
+        { field: 'email', message: 'This address has an account already. Sign in instead.' },
+      ],
     })
   }
 }

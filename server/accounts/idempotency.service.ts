@@ -2,7 +2,11 @@ import { createHash } from 'node:crypto'
 import type { Transaction } from '../db/client'
 import { inTransaction } from '../db/transaction'
 import { AppError, invalid } from '../errors'
-import { findIdempotencyKey, insertIdempotencyKey, updateIdempotencyKey } from './idempotency.queries'
+import {
+  findIdempotencyKey,
+  insertIdempotencyKey,
+  updateIdempotencyKey,
+} from './idempotency.queries'
 
 interface Repeatable {
   userId: number

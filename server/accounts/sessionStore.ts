@@ -8,20 +8,21 @@ const touchEveryMs = 10 * 60_000
 
 type Callback = (error?: unknown) => void
 
+/** The cookie counts down from the last visit; a session without a limit of its own takes the idle one. */
 const expiryOf = (data: SessionData) =>
-  new Date(data.cookie.expires ?? Date.now() + (data.cookie.originalMaxAge ?? idleLimitMs))
+  new Date(Date.now() + (data.cookie.originalMaxAge || idleLimitMs))
 
 /** express-session's store over our own pool, with the person beside the data so that all of theirs can be ended. */
 export class DatabaseSessionStore extends session.Store {
   override get(sid: string, callback: (error: unknown, data?: SessionData | null) => void) {
-    findSession(sid).then(
+    void findSession(sid).then(
       (row) => callback(null, row ? (JSON.parse(row.data) as SessionData) : null),
       (error: unknown) => callback(error),
     )
   }
 
   override set(sid: string, data: SessionData, callback?: Callback) {
-    upsertSession({
+    void upsertSession({
       sid,
       userId: data.userId ?? null,
       data: JSON.stringify(data),
@@ -31,7 +32,7 @@ export class DatabaseSessionStore extends session.Store {
 
   override touch(sid: string, data: SessionData, callback?: () => void) {
     const expiresAt = expiryOf(data)
-    findSession(sid)
+    void findSession(sid)
       .then((row) => {
         const gained = row ? expiresAt.getTime() - row.expiresAt.getTime() : 0
         return gained > touchEveryMs ? updateSessionExpiry(sid, expiresAt) : undefined
@@ -43,6 +44,6 @@ export class DatabaseSessionStore extends session.Store {
   }
 
   override destroy(sid: string, callback?: Callback) {
-    deleteSession(sid).then(() => callback?.(), callback)
+    void deleteSession(sid).then(() => callback?.(), callback)
   }
 }

@@ -19,7 +19,10 @@ export async function upsertSession(row: {
   expiresAt: Date
 }) {
   const { sid, ...rest } = row
-  await db.insert(sessions).values(row).onDuplicateKeyUpdate({ set: { ...rest, sid } })
+  await db
+    .insert(sessions)
+    .values(row)
+    .onDuplicateKeyUpdate({ set: { ...rest, sid } })
 }
 
 /** Moves the moment at which an unused session ends. */

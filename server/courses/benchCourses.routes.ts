@@ -5,7 +5,7 @@ import {
   createCourseSchema,
   issueCourseSchema,
   orderCourseSchema,
-} from '../../shared/contracts/courses'
+} from '../../shared/contracts/benchCourses'
 import { pageQuerySchema } from '../../shared/contracts/pagination'
 import { requireActor } from '../middleware/authenticate'
 import { authorize } from '../middleware/authorize'

@@ -3,7 +3,7 @@ import type {
   BenchCourseRow,
   ChangeCourse,
   CreateCourse,
-} from '../../shared/contracts/courses'
+} from '../../shared/contracts/benchCourses'
 import type { Page, PageQuery } from '../../shared/contracts/pagination'
 import { can, type Actor } from '../../shared/contracts/policies'
 import { answerOnce } from '../accounts/idempotency.service'

@@ -5,7 +5,7 @@ import {
   changeStageSchema,
   createLessonSchema,
   createStageSchema,
-} from '../../shared/contracts/courses'
+} from '../../shared/contracts/benchCourses'
 import { requireActor } from '../middleware/authenticate'
 import { authorize } from '../middleware/authorize'
 import { limitRate } from '../middleware/rateLimit'

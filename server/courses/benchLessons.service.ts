@@ -1,9 +1,5 @@
-import type {
-  BenchLesson,
-  ChangeLesson,
-  CreateLesson,
-  KitItem,
-} from '../../shared/contracts/courses'
+import type { KitItem } from '../../shared/contracts/lessons'
+import type { BenchLesson, ChangeLesson, CreateLesson } from '../../shared/contracts/benchCourses'
 import { can, type Actor } from '../../shared/contracts/policies'
 import { conflict, invalid, notFound } from '../errors'
 import { describeBenchVideo } from '../media/lessonMedia.service'

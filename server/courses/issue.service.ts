@@ -1,4 +1,4 @@
-import type { BenchCourse, IssueCourse, Snag } from '../../shared/contracts/courses'
+import type { BenchCourse, IssueCourse, Snag } from '../../shared/contracts/benchCourses'
 import type { Actor } from '../../shared/contracts/policies'
 import { conflict, invalid, notFound } from '../errors'
 import { openCourse, updateRevision } from './benchCourses.queries'

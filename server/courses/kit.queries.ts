@@ -1,5 +1,5 @@
 import { asc, eq, inArray } from 'drizzle-orm'
-import type { KitItem } from '../../shared/contracts/courses'
+import type { KitItem } from '../../shared/contracts/lessons'
 import { db, type Executor, type Transaction } from '../db/client'
 import { kitItems } from '../db/schema'
 

@@ -1,4 +1,4 @@
-import type { WatchedLesson } from '../../shared/contracts/courses'
+import type { WatchedLesson } from '../../shared/contracts/lessons'
 import type { Video } from '../../shared/contracts/media'
 import { can, type Actor } from '../../shared/contracts/policies'
 import { notFound } from '../errors'

@@ -1,4 +1,4 @@
-import type { BenchStage, Snag } from '../../shared/contracts/courses'
+import type { BenchStage, Snag } from '../../shared/contracts/benchCourses'
 import { findExerciseProblems } from '../../shared/grading'
 import type { Executor } from '../db/client'
 import { listStopsOf } from '../exercises/benchStops.service'

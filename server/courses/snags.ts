@@ -1,4 +1,6 @@
-import type { BenchStop, Hazard, KitItem, Snag } from '../../shared/contracts/courses'
+import type { Hazard } from '../../shared/contracts/courses'
+import type { KitItem } from '../../shared/contracts/lessons'
+import type { BenchStop, Snag } from '../../shared/contracts/benchCourses'
 import type { Exercise } from '../../shared/contracts/exercises'
 
 /** What the snag list looks at of one lesson. */

@@ -1,9 +1,5 @@
-import type {
-  ChangeStage,
-  CreateStage,
-  OrderCourse,
-  StageKind,
-} from '../../shared/contracts/courses'
+import type { StageKind } from '../../shared/contracts/courses'
+import type { ChangeStage, CreateStage, OrderCourse } from '../../shared/contracts/benchCourses'
 import type { Transaction } from '../db/client'
 import { conflict, invalid, notFound } from '../errors'
 import { listLessons } from './benchLessons.queries'

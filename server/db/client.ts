@@ -14,7 +14,7 @@ export function createDatabasePool(url: string, connectionLimit = 12): Pool {
     enableKeepAlive: true,
   })
   pool.on('connection', (connection) => {
-    connection.query("set time_zone = '+00:00', innodb_lock_wait_timeout = 10")
+    void connection.query("set time_zone = '+00:00', innodb_lock_wait_timeout = 10")
   })
   return pool
 }

@@ -1,5 +1,5 @@
 import { asc, eq, inArray } from 'drizzle-orm'
-import type { BenchStop } from '../../shared/contracts/courses'
+import type { BenchStop } from '../../shared/contracts/benchCourses'
 import type { Exercise, QuizQuestion } from '../../shared/contracts/exercises'
 import { db, type Executor, type Transaction } from '../db/client'
 import { exercises, lessons, quizQuestions, stops, videos } from '../db/schema'

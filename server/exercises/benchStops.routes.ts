@@ -1,6 +1,6 @@
 import { Router, type Request } from 'express'
 import { z } from 'zod'
-import { changeStopSchema, createStopSchema } from '../../shared/contracts/courses'
+import { changeStopSchema, createStopSchema } from '../../shared/contracts/benchCourses'
 import { authorize } from '../middleware/authorize'
 import { limitRate } from '../middleware/rateLimit'
 import { readBody, readParams } from '../middleware/validate'

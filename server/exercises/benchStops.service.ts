@@ -1,4 +1,4 @@
-import type { BenchStop, ChangeStop, CreateStop } from '../../shared/contracts/courses'
+import type { BenchStop, ChangeStop, CreateStop } from '../../shared/contracts/benchCourses'
 import type { Exercise } from '../../shared/contracts/exercises'
 import type { Actor } from '../../shared/contracts/policies'
 import { accessBenchRow } from '../courses/access.service'

@@ -1,5 +1,5 @@
 import { randomInt } from 'node:crypto'
-import type { TapeStop } from '../../shared/contracts/courses'
+import type { TapeStop } from '../../shared/contracts/lessons'
 import type { Executor } from '../db/client'
 import {
   findStopState,

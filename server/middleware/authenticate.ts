@@ -1,7 +1,6 @@
-import type { RequestHandler } from 'express'
+import type { Request, RequestHandler } from 'express'
 import { findSignedIn, isSessionTooOld, type SignedIn } from '../accounts/accounts.service'
 import { signInFirst } from '../errors'
-import type { Request } from 'express'
 
 /** Sets `request.actor` from the session alone. */
 export const authenticate: RequestHandler = async (request, _response, next) => {

@@ -20,7 +20,8 @@ function sendProblem(response: Response, error: AppError) {
 function fromHttpError(error: unknown): AppError | null {
   const { status, type } = error as { status?: unknown; type?: unknown }
   if (typeof status !== 'number' || status < 400 || status > 499) return null
-  if (type === 'entity.too.large') return new AppError(413, 'too-large', 'This is too large to send.')
+  if (type === 'entity.too.large')
+    return new AppError(413, 'too-large', 'This is too large to send.')
   if (type === 'entity.parse.failed') {
     return new AppError(400, 'not-json', 'The request is not JSON that can be read.', {
       errors: [{ field: '', message: 'Send JSON.' }],
@@ -31,7 +32,11 @@ function fromHttpError(error: unknown): AppError | null {
 
 /** Unknown paths under /api. */
 export const apiNotFound: RequestHandler = (request) => {
-  throw new AppError(404, 'no-such-route', `Nothing answers ${request.method} ${request.path} here.`)
+  throw new AppError(
+    404,
+    'no-such-route',
+    `Nothing answers ${request.method} ${request.path} here.`,
+  )
 }
 
 /** Turns every thrown thing into problem+json; what was not foreseen is logged and says nothing of itself. */
@@ -44,6 +49,10 @@ export const errorHandler: ErrorRequestHandler = (error, request, response, next
   logger.error({ err: error, path: request.path }, 'unexpected')
   sendProblem(
     response,
-    new AppError(500, 'unexpected', 'Something went wrong here. Nothing you sent was lost on your side; try again.'),
+    new AppError(
+      500,
+      'unexpected',
+      'Something went wrong here. Nothing you sent was lost on your side; try again.',
+    ),
   )
 }

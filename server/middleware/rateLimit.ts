@@ -1,5 +1,5 @@
 import { ipKeyGenerator, rateLimit, type Store } from 'express-rate-limit'
-import { addRateLimitHit, deleteRateLimit } from '../accounts/rateLimits.queries'
+import { countRequest, forgetRequests } from '../accounts/rateLimits.service'
 import { config } from '../config'
 import { AppError } from '../errors'
 
@@ -14,11 +14,11 @@ class DatabaseStore implements Store {
     this.windowMs = options.windowMs
   }
   increment(key: string) {
-    return addRateLimitHit(`${this.prefix}:${key}`.slice(0, 190), this.windowMs)
+    return countRequest(`${this.prefix}:${key}`.slice(0, 190), this.windowMs)
   }
   async decrement() {}
   async resetKey(key: string) {
-    await deleteRateLimit(`${this.prefix}:${key}`.slice(0, 190))
+    await forgetRequests(`${this.prefix}:${key}`.slice(0, 190))
   }
 }
 

@@ -23,5 +23,9 @@ export function comesFromOwnPages(request: IncomingMessage): boolean {
 /** Refuses every write that does not come from our own pages. */
 export const sameOrigin: RequestHandler = (request, _response, next) => {
   if (reading.has(request.method) || comesFromOwnPages(request)) return next()
-  throw new AppError(403, 'other-origin', 'This was sent from another site, so nothing was changed.')
+  throw new AppError(
+    403,
+    'other-origin',
+    'This was sent from another site, so nothing was changed.',
+  )
 }

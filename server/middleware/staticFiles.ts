@@ -35,10 +35,7 @@ function preferCompressed(folder: string): RequestHandler {
 
 function setCaching(response: Response, path: string) {
   const isHashed = path.includes('/assets/')
-  response.setHeader(
-    'Cache-Control',
-    isHashed ? 'public, max-age=31536000, immutable' : 'no-cache',
-  )
+  response.setHeader('Cache-Control', isHashed ? 'public, max-age=31536000, immutable' : 'no-cache')
 }
 
 /** The built client: hashed assets kept for a year, and the page itself for every other path. */

@@ -1,4 +1,4 @@
-import type { KitItem } from '../../shared/contracts/courses'
+import type { KitItem } from '../../shared/contracts/lessons'
 import type { KitState } from '../../shared/contracts/progress'
 import { invalid } from '../errors'
 import { insertTicks, listKitItems, listTickedKeys } from './kitChecks.queries'

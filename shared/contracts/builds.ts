@@ -24,7 +24,9 @@ export const buildSchema = z.object({
   next: z
     .object({ lessonKey: stableKeySchema, lessonTitle: z.string(), positionMs: z.number() })
     .nullable(),
-  lately: z.array(z.object({ at: z.iso.datetime(), text: z.string(), lessonKey: z.string().nullable() })),
+  lately: z.array(
+    z.object({ at: z.iso.datetime(), text: z.string(), lessonKey: z.string().nullable() }),
+  ),
 })
 export type Build = z.infer<typeof buildSchema>
 

@@ -19,7 +19,8 @@ export interface Thing {
 
 const isAdmin = (actor: Actor | null) => actor?.role === 'admin'
 const isStaff = (actor: Actor | null, thing: Thing) =>
-  isAdmin(actor) || (actor !== null && (thing.staffRole === 'owner' || thing.staffRole === 'helper'))
+  isAdmin(actor) ||
+  (actor !== null && (thing.staffRole === 'owner' || thing.staffRole === 'helper'))
 const isOwner = (actor: Actor | null, thing: Thing) =>
   isAdmin(actor) || (actor !== null && thing.staffRole === 'owner')
 const isIssued = (thing: Thing) => thing.courseState === 'issued' || thing.courseState === 'closed'

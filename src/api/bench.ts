@@ -13,7 +13,7 @@ import {
   type CreateStop,
   type IssueCourse,
   type OrderCourse,
-} from '../../shared/contracts/courses'
+} from '../../shared/contracts/benchCourses'
 import { pageOf } from '../../shared/contracts/pagination'
 import { queryString, request, requestNothing } from './client'
 

@@ -1,10 +1,7 @@
 import type { z } from 'zod'
 import { buildSchema } from '../../shared/contracts/builds'
-import {
-  sheetSchema,
-  sheetSummarySchema,
-  watchedLessonSchema,
-} from '../../shared/contracts/courses'
+import { sheetSchema, sheetSummarySchema } from '../../shared/contracts/courses'
+import { watchedLessonSchema } from '../../shared/contracts/lessons'
 import { pageOf } from '../../shared/contracts/pagination'
 import { queryString, request } from './client'
 

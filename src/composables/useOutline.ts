@@ -1,5 +1,5 @@
 import { computed, nextTick, ref, watch } from 'vue'
-import type { BenchCourse, BenchLessonRow } from '../../shared/contracts/courses'
+import type { BenchCourse, BenchLessonRow } from '../../shared/contracts/benchCourses'
 import { moveInOutline, type OutlineStage, type Picked } from '../components/courses/outlineOrder'
 
 const orderOf = (course: BenchCourse): OutlineStage[] =>

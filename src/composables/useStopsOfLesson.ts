@@ -1,5 +1,5 @@
 import { computed, ref, watch, type Ref } from 'vue'
-import type { TapeStop } from '../../shared/contracts/courses'
+import type { TapeStop } from '../../shared/contracts/lessons'
 
 interface Playing {
   positionMs: Ref<number>

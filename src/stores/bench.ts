@@ -8,7 +8,7 @@ import type {
   CreateCourse,
   CreateStage,
   OrderCourse,
-} from '../../shared/contracts/courses'
+} from '../../shared/contracts/benchCourses'
 import * as api from '../api/bench'
 
 /** The instructor's courses, and the one that lies open on the bench. */

@@ -1,6 +1,6 @@
 import { defineStore } from 'pinia'
 import { computed, ref, shallowRef } from 'vue'
-import type { WatchedLesson } from '../../shared/contracts/courses'
+import type { WatchedLesson } from '../../shared/contracts/lessons'
 import type { LessonProgress } from '../../shared/contracts/progress'
 import { fetchLesson, type LessonPlace } from '../api/courses'
 import { tickKit as sendTicks } from '../api/progress'

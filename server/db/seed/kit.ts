@@ -1,4 +1,5 @@
-import type { Hazard, KitItem } from '../../../shared/contracts/courses'
+import type { Hazard } from '../../../shared/contracts/courses'
+import type { KitItem } from '../../../shared/contracts/lessons'
 
 export const onYou = (key: string, icon: string, title: string, detail: string): KitItem => ({
   key,

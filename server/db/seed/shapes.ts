@@ -1,4 +1,5 @@
-import type { CoverDrawing, Hazard, KitItem, StageKind } from '../../../shared/contracts/courses'
+import type { CoverDrawing, Hazard, StageKind } from '../../../shared/contracts/courses'
+import type { KitItem } from '../../../shared/contracts/lessons'
 import type { Exercise, QuestionAnswer } from '../../../shared/contracts/exercises'
 import type { Interval } from '../../../shared/contracts/progress'
 import type { PersonKey } from './people'

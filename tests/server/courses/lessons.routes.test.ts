@@ -2,7 +2,7 @@ import { eq } from 'drizzle-orm'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { db } from '../../../server/db/client'
 import { kitTicks, stopStates } from '../../../server/db/schema'
-import { watchedLessonSchema } from '../../../shared/contracts/courses'
+import { watchedLessonSchema } from '../../../shared/contracts/lessons'
 import { startTestApp, type TestApp } from '../../support/app'
 import {
   addHelper,

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { findSnags, type CourseToCheck, type LessonToCheck } from '../../../server/courses/snags'
-import type { BenchStop } from '../../../shared/contracts/courses'
+import type { BenchStop } from '../../../shared/contracts/benchCourses'
 import { findExerciseProblems } from '../../../shared/grading'
 import { singleQuestion } from '../../support/factories'
 
