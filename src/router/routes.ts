@@ -80,6 +80,18 @@ export const routes: RouteRecordRaw[] = [
         meta: { title: 'Over the fence' },
       },
       {
+        path: 'calculators',
+        name: 'calculators',
+        component: () => import('../pages/exercises/CalculatorsPage.vue'),
+        meta: { title: 'Calculators' },
+      },
+      {
+        path: 'calculators/:id',
+        name: 'calculator',
+        component: () => import('../pages/exercises/CalculatorPage.vue'),
+        meta: { title: 'Calculator' },
+      },
+      {
         path: 'bench',
         name: 'bench',
         component: () => import('../pages/courses/BenchPage.vue'),
