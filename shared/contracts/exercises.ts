@@ -40,17 +40,30 @@ export const calculatorDefinitionSchema = z.strictObject({
 })
 export type CalculatorDefinition = z.infer<typeof calculatorDefinitionSchema>
 
+/** Drawings a choice may show; the names tell what is seen, not which is right. */
+export const choiceDrawingSchema = z.enum([
+  'furrow-falls-in',
+  'furrow-rough-top',
+  'furrow-closed-top',
+  'furrow-water-shows',
+])
+export type ChoiceDrawing = z.infer<typeof choiceDrawingSchema>
+
 const choiceSchema = z.strictObject({
   id: z.string().min(1).max(20),
   text: z.string().trim().min(1).max(300),
   right: z.boolean(),
   /** What this choice would do on site, shown once it was tried. */
   feedback: z.string().trim().max(400),
+  drawing: choiceDrawingSchema.optional(),
 })
-const choicesSchema = z.array(choiceSchema).min(2).max(8)
-
-export const singleQuestionSchema = z.strictObject({ choices: choicesSchema })
-export const severalQuestionSchema = z.strictObject({ choices: choicesSchema })
+const choiceQuestionSchema = z.strictObject({
+  choices: z.array(choiceSchema).min(2).max(8),
+  /** The choices stay in the order they are written, as where the video letters them; otherwise each learner gets an order of their own. */
+  keepsOrder: z.boolean().optional(),
+})
+export const singleQuestionSchema = choiceQuestionSchema
+export const severalQuestionSchema = choiceQuestionSchema
 export const numberQuestionSchema = z.strictObject({
   /** The right value as the instructor typed it, with its unit. */
   answer: typedValueSchema.min(1),
@@ -131,7 +144,9 @@ export const learnerQuestionSchema = z.object({
   key: stableKeySchema,
   kind: questionKindSchema,
   prompt: z.string(),
-  choices: z.array(z.object({ id: z.string(), text: z.string() })).optional(),
+  choices: z
+    .array(z.object({ id: z.string(), text: z.string(), drawing: choiceDrawingSchema.optional() }))
+    .optional(),
   items: z.array(z.object({ id: z.string(), text: z.string() })).optional(),
   quantity: z.string().optional(),
   /** The unit a bare number takes, and which the field shows, in either system. */

@@ -4,9 +4,13 @@ import { shuffle } from './seededRandom'
 
 type Choice = SingleQuestion['choices'][number]
 
-/** Choices as a learner sees them: no right marks, no feedback, in an order of the seed's. */
-export const shuffleChoices = (choices: Choice[], seed: number) =>
-  shuffle(choices, seed).map(({ id, text }) => ({ id, text }))
+/** Choices as a learner sees them: no right marks, no feedback, in an order of the seed's unless theirs is kept. */
+export const showChoices = ({ choices, keepsOrder }: SingleQuestion, seed: number) =>
+  (keepsOrder ? choices : shuffle(choices, seed)).map(({ id, text, drawing }) => ({
+    id,
+    text,
+    ...(drawing ? { drawing } : {}),
+  }))
 
 /** What any set of choices must have: ids of their own, texts of their own, and feedback worth writing. */
 export function findChoiceProblems(choices: Choice[]): ExerciseProblem[] {

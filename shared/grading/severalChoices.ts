@@ -1,5 +1,5 @@
 import type { SeveralQuestion } from '../contracts/exercises'
-import { findChoiceProblems, shuffleChoices } from './choices'
+import { findChoiceProblems, showChoices } from './choices'
 import { unread, type QuestionGrader } from './grader'
 
 /** Any number of choices are right; all of them and no other must be picked. */
@@ -20,7 +20,7 @@ export const severalChoices: QuestionGrader<SeveralQuestion> = {
       rightIds,
     }
   },
-  toLearner: ({ choices }, seed) => ({ choices: shuffleChoices(choices, seed) }),
+  toLearner: (definition, seed) => ({ choices: showChoices(definition, seed) }),
   showAnswer: ({ choices }) =>
     choices
       .filter(({ right }) => right)

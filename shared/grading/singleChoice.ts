@@ -1,5 +1,5 @@
 import type { SingleQuestion } from '../contracts/exercises'
-import { findChoiceProblems, shuffleChoices } from './choices'
+import { findChoiceProblems, showChoices } from './choices'
 import { unread, type QuestionGrader } from './grader'
 
 /** One choice is right; the tried one alone is answered. */
@@ -16,7 +16,7 @@ export const singleChoice: QuestionGrader<SingleQuestion> = {
       rightIds: tried.right ? [tried.id] : [],
     }
   },
-  toLearner: ({ choices }, seed) => ({ choices: shuffleChoices(choices, seed) }),
+  toLearner: (definition, seed) => ({ choices: showChoices(definition, seed) }),
   showAnswer: ({ choices }) => choices.find(({ right }) => right)?.text ?? '',
   findProblems({ choices }) {
     const rights = choices.filter(({ right }) => right).length

@@ -1,5 +1,6 @@
 import type {
   CalculatorDefinition,
+  ChoiceDrawing,
   Exercise,
   ExerciseInput,
   QuizQuestion,
@@ -59,6 +60,16 @@ export function single(
   const all = wrong.map(mark(false))
   all.splice(place, 0, mark(true)(right))
   return { key, kind: 'single', prompt, definition: { choices: choices(all) } }
+}
+
+/** The same question with its choices drawn and lettered as the video shows them. */
+export function drawn(question: QuizQuestion, drawings: ChoiceDrawing[]): QuizQuestion {
+  if (question.kind !== 'single') throw new Error(`${question.key} has no single choice to draw`)
+  const shown = question.definition.choices.map((choice, index) => {
+    const drawing = drawings[index]
+    return drawing ? { ...choice, drawing } : choice
+  })
+  return { ...question, definition: { choices: shown, keepsOrder: true } }
 }
 
 /** Several right choices, told apart by their first word: true or false. */

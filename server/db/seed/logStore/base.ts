@@ -1,5 +1,6 @@
 import {
   bothDiagonals,
+  drawn,
   exactly,
   fixed,
   inOrder,
@@ -254,28 +255,31 @@ export const base: StageSeed = {
           name: 'The mix',
           at: { stop: 'the-mix' },
           exercise: quiz('A trowel is pulled through once.', 100, null, [
-            single(
-              'furrow',
-              'Which of the four goes into the form, with a fall of 10 mm per metre (1/8 in per foot) to keep?',
-              [
-                'C: the furrow stands, the top closes',
-                'Right. The furrow stands, so the fall stays; the top closes, so the float can finish it.',
-              ],
-              [
+            drawn(
+              single(
+                'furrow',
+                'Which of the four goes into the form, with a fall of 10 mm per metre (1/8 in per foot) to keep?',
                 [
-                  'A: the furrow falls in',
-                  'Too dry. Water has not reached all of it; it leaves hollows along the form. Add a cupful, turn it twice.',
+                  'It stands, the top closes',
+                  'Right. The furrow stands, so the fall stays; the top closes, so the float can finish it.',
                 ],
                 [
-                  'B: it stands, the top stays rough',
-                  'Nearly. The float tears it instead of closing it. A cupful more, and no more than the bag allows.',
+                  [
+                    'The furrow falls in',
+                    'Too dry. Water has not reached all of it; it leaves hollows along the form. Add a cupful, turn it twice.',
+                  ],
+                  [
+                    'It stands, the top stays rough',
+                    'Nearly. The float tears it instead of closing it. A cupful more, and no more than the bag allows.',
+                  ],
+                  [
+                    'It closes, water shows',
+                    'Too wet. It runs down the fall and dries weak. Add dry mix, never sand alone.',
+                  ],
                 ],
-                [
-                  'D: it closes, water shows',
-                  'Too wet. It runs down the fall and dries weak. Add dry mix, never sand alone.',
-                ],
-              ],
-              2,
+                2,
+              ),
+              ['furrow-falls-in', 'furrow-rough-top', 'furrow-closed-top', 'furrow-water-shows'],
             ),
           ]),
         },
