@@ -25,6 +25,27 @@ const wrongKinds: Record<string, QuestionAnswer> = {
 }
 
 describe('single choice', () => {
+  it('shows the drawings, and keeps the written order where the video letters the choices', () => {
+    if (questions.single.kind !== 'single') throw new Error('not a single choice')
+    const choices = questions.single.definition.choices.map((choice) => ({
+      ...choice,
+      drawing: 'furrow-rough-top' as const,
+    }))
+    const written = choices.map(({ id }) => id)
+    for (let seed = 1; seed <= 20; seed++) {
+      const shown = toLearnerQuestion(
+        { ...questions.single, definition: { choices, keepsOrder: true } },
+        seed,
+      )
+      expect(shown.choices?.map(({ id }) => id)).toEqual(written)
+      expect(shown.choices?.[0]).toEqual({
+        id: choices[0]?.id,
+        text: choices[0]?.text,
+        drawing: 'furrow-rough-top',
+      })
+    }
+  })
+
   it('answers the tried choice alone', () => {
     expect(grade(questions.single, { choice: 'a' })).toEqual({
       right: true,
