@@ -73,7 +73,7 @@ export function useCueSheet(trackId: number) {
   async function save() {
     if (isSending || edits === 0 || theirVersion.value !== null) return
     const read = readRows(rows.value)
-    errors.value = read.ok ? new Map() : read.errors
+    errors.value = read.ok ? new Map<number, CueErrors>() : read.errors
     if (!read.ok) {
       refuse('the marked captions cannot be kept like this. All of it is kept on this device.')
       return

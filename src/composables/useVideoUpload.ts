@@ -38,7 +38,7 @@ export function useVideoUpload(lessonId: number) {
 
   /** A line that is down leaves the page as it is; the next look may go through. */
   const look = () => lessons.refresh().catch(() => undefined)
-  const poll = useIntervalFn(look, pollMs, { immediate: false })
+  const poll = useIntervalFn(() => void look(), pollMs, { immediate: false })
   watch(isChecking, (checking) => (checking ? poll.resume() : poll.pause()), { immediate: true })
   watch(
     () => upload.value?.state,

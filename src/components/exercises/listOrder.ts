@@ -13,9 +13,9 @@ export const changeRow = <T extends object>(
   part: Partial<T>,
 ): T[] => rows.map((row, at) => (at === index ? { ...row, ...part } : row))
 
-const letters = 'abcdefghijklmnopqrstuvwxyz'
+const letters = Array.from('abcdefghijklmnopqrstuvwxyz')
 
 /** The first letter that no row has as its id. */
 export const freeId = (rows: readonly { id: string }[]): string =>
-  [...letters].find((letter) => !rows.some(({ id }) => id === letter)) ??
+  letters.find((letter) => !rows.some(({ id }) => id === letter)) ??
   crypto.randomUUID().slice(0, 8)
