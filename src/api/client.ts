@@ -56,6 +56,13 @@ async function readProblem(response: Response): Promise<ApiProblem> {
   })
 }
 
+let tellSignedOut = () => {}
+
+/** Calls `listener` whenever the server says that nobody is signed in here any more. */
+export function onSignedOut(listener: () => void) {
+  tellSignedOut = listener
+}
+
 interface RequestOptions {
   method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE'
   body?: unknown
@@ -78,8 +85,10 @@ async function send(path: string, options: RequestOptions): Promise<Response> {
   }).catch((error: unknown) => {
     throw error instanceof DOMException && error.name === 'AbortError' ? error : offline()
   })
-  if (!response.ok) throw await readProblem(response)
-  return response
+  if (response.ok) return response
+  const problem = await readProblem(response)
+  if (problem.code === 'sign-in-first') tellSignedOut()
+  throw problem
 }
 
 /** Asks the API and checks the answer by its contract. Throws ApiProblem. */

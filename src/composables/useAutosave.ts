@@ -1,6 +1,6 @@
-import { useDebounceFn, useEventListener, useLocalStorage } from '@vueuse/core'
+import { tryOnScopeDispose, useDebounceFn, useEventListener, useLocalStorage } from '@vueuse/core'
 import { computed, reactive, ref, watch } from 'vue'
-import { asProblem } from '../api/client'
+import { asProblem, type ApiProblem } from '../api/client'
 import type { SaveState } from './useSavedField'
 
 interface Autosave<T extends object> {
@@ -13,40 +13,73 @@ interface Autosave<T extends object> {
   save: (changes: Partial<T>, version: number) => Promise<{ version: number; savedAt?: string }>
 }
 
+/** What was typed and not sent, beside what stood there before. */
+interface Unsent<T> {
+  changes: Partial<T>
+  before: Partial<T>
+}
+
 const pauseMs = 700
 const same = (a: unknown, b: unknown) => JSON.stringify(a) === JSON.stringify(b)
 const copy = <V>(value: V): V => JSON.parse(JSON.stringify(value)) as V
+const isEmpty = (value: object) => Object.keys(value).length === 0
+const fieldOf = (path: string) => path.split('.')[0] ?? path
 
 /**
  * A form that is saved as it is typed, field by field. What is refused stays in its field with the
- * reason beside it; what could not be sent is kept on the device and sent when the line is back;
- * what somebody else saved meanwhile is taken over except where it was changed here.
+ * reason beside it and does not hold up the rest; what could not be sent is kept on the device and
+ * sent when the line is back; what somebody else saved meanwhile is taken over, except where it was
+ * changed here too: then it is said what they wrote.
  */
 export function useAutosave<T extends object>({ name, initial, version, save }: Autosave<T>) {
-  const unsent = useLocalStorage<Partial<T>>(`gf-unsent:${name}`, {})
+  const unsent = useLocalStorage<Unsent<T>>(
+    `gf-unsent:${name}`,
+    { changes: {}, before: {} },
+    { listenToStorageChanges: false },
+  )
   const base = ref(copy(initial)) as { value: T }
-  const form = reactive(copy({ ...initial, ...unsent.value })) as T
+  const form = reactive(copy({ ...initial, ...unsent.value.changes })) as T
+  const keys = Object.keys(initial) as (keyof T)[]
   const state = ref<SaveState>('idle')
   const savedAt = ref<Date | null>(null)
   const message = ref('')
   const errors = ref<Record<string, string>>({})
+  /** Refused values by field; the same is not sent twice. */
+  const refused = new Map<keyof T, unknown>()
+  let overtaken = ''
   let current = version
   let isSending = false
   let isWaiting = false
 
   const changes = computed(() => {
     const changed: Partial<T> = {}
-    for (const key of Object.keys(form) as (keyof T)[]) {
-      if (!same(form[key], base.value[key])) changed[key] = copy(form[key])
-    }
+    for (const key of keys) if (!same(form[key], base.value[key])) changed[key] = copy(form[key])
     return changed
   })
+
+  function keep() {
+    const kept = changes.value
+    const before: Partial<T> = {}
+    for (const key of Object.keys(kept) as (keyof T)[]) before[key] = base.value[key]
+    unsent.value = copy({ changes: kept, before })
+  }
+
+  /** Says what somebody else wrote where something was typed here as well. */
+  function compare(theirs: Partial<T>, before: Partial<T>, mine: Partial<T>) {
+    for (const key of Object.keys(mine) as (keyof T)[]) {
+      const value = theirs[key]
+      if (value === undefined || same(value, before[key]) || same(value, mine[key])) continue
+      const words = typeof value === 'string' && value !== '' ? `: “${value}”` : ''
+      overtaken = `This was changed elsewhere meanwhile${words}. What stands here was kept.`
+    }
+  }
 
   /** Takes over what the server holds now, except what was changed here. */
   function rebase(theirs: Partial<T>, theirVersion: number) {
     const mine = changes.value
+    compare(theirs, base.value, mine)
     current = theirVersion
-    for (const key of Object.keys(base.value) as (keyof T)[]) {
+    for (const key of keys) {
       const value = theirs[key]
       if (value === undefined) continue
       base.value[key] = copy(value)
@@ -54,61 +87,89 @@ export function useAutosave<T extends object>({ name, initial, version, save }: 
     }
   }
 
-  async function saveNow(): Promise<void> {
-    if (isSending) {
+  function forgive(key: keyof T) {
+    refused.delete(key)
+    errors.value = Object.fromEntries(
+      Object.entries(errors.value).filter(([path]) => fieldOf(path) !== key),
+    )
+  }
+
+  function onSaved(sent: Partial<T>, saved: { version: number; savedAt?: string }) {
+    current = saved.version
+    Object.assign(base.value, copy(sent))
+    for (const key of Object.keys(sent) as (keyof T)[]) forgive(key)
+    savedAt.value = saved.savedAt ? new Date(saved.savedAt) : new Date()
+    state.value = refused.size > 0 ? 'refused' : 'saved'
+    if (refused.size > 0) return
+    message.value = overtaken
+    overtaken = ''
+  }
+
+  function onRefused(sent: Partial<T>, problem: ApiProblem) {
+    const theirs = problem.problem.current as (Partial<T> & { version?: number }) | undefined
+    if (problem.status === 409 && theirs?.version !== undefined && theirs.version !== current) {
+      rebase(theirs, theirs.version)
       isWaiting = true
       return
     }
-    const sent = changes.value
-    if (Object.keys(sent).length === 0) return
-    isSending = true
-    state.value = 'saving'
-    try {
-      const saved = await save(sent, current)
-      current = saved.version
-      Object.assign(base.value, copy(sent))
-      savedAt.value = saved.savedAt ? new Date(saved.savedAt) : new Date()
-      errors.value = {}
-      message.value = ''
-      state.value = 'saved'
-    } catch (error) {
-      const problem = asProblem(error)
-      const theirs = problem.problem.current as (Partial<T> & { version?: number }) | undefined
-      if (problem.status === 409 && typeof theirs?.version === 'number') {
-        rebase(theirs, theirs.version)
-        isWaiting = true
-      } else {
-        state.value = problem.isOffline ? 'offline' : 'refused'
-        message.value = problem.message
-        errors.value = Object.fromEntries(
-          problem.errors.map(({ field, message: text }) => [field, text]),
-        )
-      }
-    } finally {
-      isSending = false
-      unsent.value = changes.value
-    }
-    if (isWaiting) {
-      isWaiting = false
-      await saveNow()
+    state.value = problem.isOffline ? 'offline' : 'refused'
+    message.value = problem.message
+    for (const { field, message: text } of problem.errors) {
+      const key = fieldOf(field) as keyof T
+      errors.value = { ...errors.value, [field]: text }
+      if (!(key in sent)) continue
+      refused.set(key, sent[key])
+      isWaiting = true
     }
   }
+
+  async function send() {
+    const sent = Object.fromEntries(
+      Object.entries(changes.value).filter(([key]) => !refused.has(key as keyof T)),
+    ) as Partial<T>
+    if (isEmpty(sent)) return
+    state.value = 'saving'
+    try {
+      onSaved(sent, await save(sent, current))
+    } catch (error) {
+      onRefused(sent, asProblem(error))
+    }
+  }
+
+  async function saveNow(): Promise<void> {
+    isWaiting = true
+    if (isSending) return
+    isSending = true
+    while (isWaiting) {
+      isWaiting = false
+      await send()
+    }
+    isSending = false
+    keep()
+  }
+
   const saveSoon = useDebounceFn(saveNow, pauseMs)
   watch(
     changes,
     (changed) => {
-      unsent.value = changed
-      if (Object.keys(changed).length > 0) void saveSoon()
+      for (const [key, value] of refused) if (!same(form[key], value)) forgive(key)
+      keep()
+      if (!isEmpty(changed)) void saveSoon()
+      else if (state.value === 'refused' || state.value === 'offline') state.value = 'idle'
     },
     { deep: true },
   )
   useEventListener(window, 'online', () => void saveNow())
-  if (Object.keys(unsent.value).length > 0) void saveNow()
+  tryOnScopeDispose(() => void saveNow())
+  if (!isEmpty(unsent.value.changes)) {
+    compare(initial, unsent.value.before, unsent.value.changes)
+    void saveNow()
+  }
 
   /** The error of a field, or of anything inside it. */
   const errorOf = (field: string) =>
     errors.value[field] ??
-    Object.entries(errors.value).find(([path]) => path.startsWith(`${field}.`))?.[1] ??
+    Object.entries(errors.value).find(([path]) => fieldOf(path) === field)?.[1] ??
     ''
   return { form, state, savedAt, message, errorOf, saveNow, rebase }
 }

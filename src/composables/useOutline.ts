@@ -1,14 +1,23 @@
 import { computed, nextTick, ref, watch } from 'vue'
-import type { BenchCourse, BenchLessonRow } from '../../shared/contracts/benchCourses'
+import type { BenchCourse, BenchLessonRow, BenchStage } from '../../shared/contracts/benchCourses'
+import { asProblem } from '../api/client'
 import { moveInOutline, type OutlineStage, type Picked } from '../components/courses/outlineOrder'
+
+export type OutlineLesson = BenchLessonRow & { number: number }
+export type OutlineRow = BenchStage & { number: number; rows: OutlineLesson[] }
+export type Outline = ReturnType<typeof useOutline>
 
 const orderOf = (course: BenchCourse): OutlineStage[] =>
   course.stages.map((stage) => ({
     id: stage.id,
     lessonIds: stage.lessons.map((lesson) => lesson.id),
   }))
+const same = (a: unknown, b: unknown) => JSON.stringify(a) === JSON.stringify(b)
 
-/** The order of stages and lessons while it is changed: picked up and moved by keys, or dragged. */
+/**
+ * The order of stages and lessons while it is changed: picked up and moved by keys, or dragged.
+ * It is saved at once; an order that is refused is put back, with the reason in `message`.
+ */
 export function useOutline(
   course: () => BenchCourse,
   save: (order: OutlineStage[]) => Promise<void>,
@@ -16,41 +25,68 @@ export function useOutline(
   const order = ref<OutlineStage[]>(orderOf(course()))
   const picked = ref<Picked | null>(null)
   const said = ref('')
+  const message = ref('')
   let before: OutlineStage[] = []
+  let isSaving = false
+  let isWaiting = false
 
   watch(course, (changed) => {
-    if (!picked.value) order.value = orderOf(changed)
+    if (!picked.value && !isWaiting) order.value = orderOf(changed)
   })
 
-  const lessons = computed(() => {
-    const rows = new Map<number, BenchLessonRow>()
-    for (const stage of course().stages) {
-      for (const lesson of stage.lessons) rows.set(lesson.id, lesson)
-    }
-    return rows
-  })
   /** Stages and lessons in the order of this moment, numbered through. */
-  const stages = computed(() => {
+  const stages = computed<OutlineRow[]>(() => {
+    const all = course().stages
+    const lessons = new Map(all.flatMap((stage) => stage.lessons).map((row) => [row.id, row]))
     let number = 0
-    return order.value.flatMap(({ id, lessonIds }) => {
-      const stage = course().stages.find((candidate) => candidate.id === id)
+    return order.value.flatMap(({ id, lessonIds }, index) => {
+      const stage = all.find((candidate) => candidate.id === id)
+      const rows = lessonIds.flatMap((lessonId) => lessons.get(lessonId) ?? [])
       if (!stage) return []
-      const rows = lessonIds.flatMap((lessonId) => lessons.value.get(lessonId) ?? [])
-      return [{ ...stage, rows: rows.map((row) => ({ ...row, number: ++number })) }]
+      return [
+        { ...stage, number: index + 1, rows: rows.map((row) => ({ ...row, number: ++number })) },
+      ]
     })
   })
-  const placeOf = ({ kind, id }: Picked) => {
+
+  function placeOf({ kind, id }: Picked) {
     if (kind === 'stage') {
-      const index = order.value.findIndex((stage) => stage.id === id)
-      return `stage ${index + 1} of ${order.value.length}`
+      const stage = stages.value.find((candidate) => candidate.id === id)
+      return `stage ${stage?.number ?? 0} of ${stages.value.length}`
     }
     const stage = stages.value.find(({ rows }) => rows.some((row) => row.id === id))
     const row = stage?.rows.find((candidate) => candidate.id === id)
-    return `lesson ${row?.number ?? 0} of ${lessons.value.size}, ${stage?.title ?? ''}`
+    const inAll = stages.value.reduce((sum, { rows }) => sum + rows.length, 0)
+    return `lesson ${row?.number ?? 0} of ${inAll}, ${stage?.title ?? ''}`
   }
+  const isHeld = (kind: Picked['kind'], id: number) =>
+    picked.value?.kind === kind && picked.value.id === id
+
   async function keepFocus({ kind, id }: Picked) {
     await nextTick()
     document.querySelector<HTMLElement>(`[data-grip="${kind}-${id}"]`)?.focus()
+  }
+
+  /** Saves the order as it stands, one save after the other. */
+  async function keep(): Promise<void> {
+    if (same(order.value, orderOf(course()))) return
+    isWaiting = isSaving
+    if (isSaving) return
+    isSaving = true
+    message.value = ''
+    try {
+      await save(order.value)
+    } catch (error) {
+      isWaiting = false
+      order.value = orderOf(course())
+      message.value = `The order was put back. ${asProblem(error).message}`
+    } finally {
+      isSaving = false
+    }
+    if (isWaiting) {
+      isWaiting = false
+      await keep()
+    }
   }
 
   function pickUp(what: Picked) {
@@ -61,7 +97,7 @@ export function useOutline(
   function move(by: -1 | 1) {
     if (!picked.value) return
     order.value = moveInOutline(order.value, picked.value, by)
-    said.value = placeOf(picked.value)
+    said.value = `Now ${placeOf(picked.value)}.`
     void keepFocus(picked.value)
   }
   async function putDown() {
@@ -69,8 +105,8 @@ export function useOutline(
     if (!what) return
     said.value = `Put down: ${placeOf(what)}.`
     picked.value = null
-    await save(order.value)
     await keepFocus(what)
+    await keep()
   }
   function putBack() {
     const what = picked.value
@@ -80,19 +116,36 @@ export function useOutline(
     said.value = 'Put back where it was.'
     void keepFocus(what)
   }
+
+  /** A press of the grip, by Space, Enter, mouse or finger. */
+  async function press(what: Picked) {
+    if (isHeld(what.kind, what.id)) return putDown()
+    await putDown()
+    pickUp(what)
+  }
   function onKey(event: KeyboardEvent, what: Picked) {
-    const isHeld = picked.value?.kind === what.kind && picked.value.id === what.id
-    if (event.key === ' ' || (event.key === 'Enter' && isHeld)) {
-      if (isHeld) void putDown()
-      else pickUp(what)
-    } else if (isHeld && event.key === 'ArrowUp') move(-1)
-    else if (isHeld && event.key === 'ArrowDown') move(1)
-    else if (isHeld && event.key === 'Escape') putBack()
+    if (!isHeld(what.kind, what.id)) return
+    if (event.key === 'ArrowUp') move(-1)
+    else if (event.key === 'ArrowDown') move(1)
+    else if (event.key === 'Escape') putBack()
     else return
     event.preventDefault()
   }
-  /** After a drag the lists already stand as they were dropped. */
-  const drop = () => save(order.value)
 
-  return { order, stages, picked, said, placeOf, pickUp, move, putDown, putBack, onKey, drop }
+  /** What a drag has left: a list of the lessons of one stage, or of the stages. */
+  function setLessons(stageId: number, lessonIds: number[]) {
+    order.value = order.value.map((stage) =>
+      stage.id === stageId ? { ...stage, lessonIds } : stage,
+    )
+  }
+  function setStages(ids: number[]) {
+    order.value = ids.flatMap((id) => order.value.find((stage) => stage.id === id) ?? [])
+  }
+  const lessonIdsOf = (stageId: number) =>
+    order.value.find((stage) => stage.id === stageId)?.lessonIds ?? []
+
+  return {
+    ...{ order, stages, picked, said, message, isHeld, placeOf, lessonIdsOf },
+    ...{ press, move, putDown, putBack, onKey, setLessons, setStages, keep },
+  }
 }

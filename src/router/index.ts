@@ -15,13 +15,20 @@ declare module 'vue-router' {
 export const router = createRouter({
   history: createWebHistory(),
   routes,
-  scrollBehavior: (to, from, saved) => saved ?? (to.path === from.path ? undefined : { top: 0 }),
+  scrollBehavior(to, from, saved) {
+    if (saved) return saved
+    if (to.hash) return { el: to.hash, top: 16 }
+    return to.path === from.path ? undefined : { top: 0 }
+  },
 })
 
+/** Who is signed in is asked while a page is fetched; a page of one's own waits for the answer. */
 router.beforeEach(async (to) => {
-  await useAccountsStore().load()
+  const asked = useAccountsStore().load()
+  if (to.meta.needsSignIn) await asked
   return guardSignedIn(to)
 })
+router.beforeResolve(() => useAccountsStore().load())
 
 router.afterEach(async (to, from, failure) => {
   if (failure) return

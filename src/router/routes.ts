@@ -1,11 +1,12 @@
 import type { RouteRecordRaw } from 'vue-router'
+import MainLayout from '../layouts/MainLayout.vue'
 
 const own = { needsSignIn: true }
 
 export const routes: RouteRecordRaw[] = [
   {
     path: '/',
-    component: () => import('../layouts/MainLayout.vue'),
+    component: MainLayout,
     children: [
       {
         path: '',

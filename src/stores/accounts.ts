@@ -4,23 +4,26 @@ import { computed, ref } from 'vue'
 import type { ChangeAccount, Me, SignIn, SignUp } from '../../shared/contracts/accounts'
 import type { UnitSystem } from '../../shared/contracts/exercises'
 import * as api from '../api/accounts'
+import { asProblem, onSignedOut } from '../api/client'
 
 /** Who is signed in here, and how they like to read: units and theme, kept on the device for visitors. */
 export const useAccountsStore = defineStore('accounts', () => {
   const me = ref<Me | null>(null)
-  const deviceUnits = useLocalStorage<UnitSystem>('gf-units', 'metric')
-  const deviceTheme = useLocalStorage<'paper' | 'sun'>('gf-theme', 'paper')
+  /** On the device, and so the same at once in every window of it. */
+  const units = useLocalStorage<UnitSystem>('gf-units', 'metric')
+  const theme = useLocalStorage<'paper' | 'sun'>('gf-theme', 'paper')
+  /** The session was ended from another device while somebody was at work here. */
+  const hasEndedElsewhere = ref(false)
   let loading: Promise<void> | null = null
 
   const isSignedIn = computed(() => me.value !== null)
-  const units = computed(() => me.value?.units ?? deviceUnits.value)
-  const theme = computed(() => me.value?.theme ?? deviceTheme.value)
 
   function take(user: Me | null) {
     me.value = user
+    hasEndedElsewhere.value = false
     if (!user) return
-    deviceUnits.value = user.units
-    deviceTheme.value = user.theme
+    units.value = user.units
+    theme.value = user.theme
   }
 
   /** Asks once who is signed in; a lost line leaves a visitor. */
@@ -50,31 +53,40 @@ export const useAccountsStore = defineStore('accounts', () => {
   async function openBench() {
     take((await api.openBench()).user)
   }
+  /** What is kept with the account when the line is back, should it be down now. */
+  async function keepWithAccount(choice: Pick<ChangeAccount, 'units' | 'theme'>) {
+    if (!me.value) return
+    try {
+      await change(choice)
+    } catch (error) {
+      if (asProblem(error).isOffline) {
+        addEventListener('online', () => void keepWithAccount(choice), { once: true })
+      }
+    }
+  }
+
   /** Units at once here, and kept with the account when there is one. */
   async function setUnits(value: UnitSystem) {
-    deviceUnits.value = value
-    if (me.value) {
-      me.value = { ...me.value, units: value }
-      await change({ units: value })
-    }
+    units.value = value
+    await keepWithAccount({ units: value })
   }
   async function setTheme(value: 'paper' | 'sun') {
-    deviceTheme.value = value
-    if (me.value) {
-      me.value = { ...me.value, theme: value }
-      await change({ theme: value })
-    }
+    theme.value = value
+    await keepWithAccount({ theme: value })
   }
-  /** The session ended elsewhere. */
-  function forget() {
+
+  onSignedOut(() => {
+    if (!me.value) return
     take(null)
-  }
+    hasEndedElsewhere.value = true
+  })
 
   return {
     me,
     isSignedIn,
     units,
     theme,
+    hasEndedElsewhere,
     load,
     signUp,
     signIn,
@@ -83,6 +95,5 @@ export const useAccountsStore = defineStore('accounts', () => {
     openBench,
     setUnits,
     setTheme,
-    forget,
   }
 })
