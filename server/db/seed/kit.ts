@@ -56,7 +56,7 @@ export const kit = {
   ),
   eyes: onYou(
     'eyes',
-    'eyes',
+    'goggles',
     'Eye protection',
     'On before the first blow or cut, and on helpers too.',
   ),
@@ -76,7 +76,7 @@ export const kit = {
   sleeves: onYou('sleeves', 'sleeves', 'Long sleeves', 'Buttoned, nothing loose near a blade.'),
   rinse: toHand(
     'rinse-water',
-    'water',
+    'bucket',
     'Clean water, a bucket only for skin and eyes',
     'Not the mixing water.',
   ),

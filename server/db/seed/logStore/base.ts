@@ -34,7 +34,7 @@ export const base: StageSeed = {
         kit.boots,
         kit.mask,
         kit.workGloves,
-        toHand('tamper', 'tamp', 'Tamper', 'A hand tamper does a pad of this size in an hour.'),
+        toHand('tamper', 'tamper', 'Tamper', 'A hand tamper does a pad of this size in an hour.'),
         kit.level,
         kit.services,
         kit.blade,
@@ -109,13 +109,13 @@ export const base: StageSeed = {
         kit.boots,
         toHand(
           'tape',
-          'generic',
+          'tape',
           'Tape of 5 m (16 ft) and a pencil',
           'One tape for everything: two tapes differ.',
         ),
         toHand(
           'hammer',
-          'generic',
+          'hammer',
           'Hammer and pegs',
           'Pegs half driven until both diagonals agree.',
         ),
@@ -191,7 +191,7 @@ export const base: StageSeed = {
         kit.barrow,
         toHand(
           'float',
-          'float',
+          'board-float',
           'Straight board and float',
           'A board longer than the pad is deep.',
         ),

@@ -20,13 +20,13 @@ export const ground: StageSeed = {
         kit.workGloves,
         toHand(
           'spade',
-          'generic',
+          'spade',
           'Spade and a bucket',
           'For one trial hole, a spade deep and wide.',
         ),
         toHand(
           'pegs',
-          'generic',
+          'string',
           'Four pegs and a string',
           'To see the size before you believe it.',
         ),

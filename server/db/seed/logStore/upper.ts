@@ -105,7 +105,7 @@ export const roof: StageSeed = {
         ),
         toHand(
           'platform',
-          'generic',
+          'ladder',
           'A platform or a tied ladder',
           'On the pad, not on the grass.',
         ),

@@ -36,7 +36,7 @@ export const base: StageSeed = {
         kit.rinse,
         toHand(
           'spade',
-          'generic',
+          'spade',
           'Post-hole spade and a bar',
           'For the hole that widens as it goes down.',
         ),
