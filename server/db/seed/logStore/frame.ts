@@ -30,7 +30,7 @@ export const frame: StageSeed = {
         kit.mask,
         onYou(
           'ears',
-          'generic',
+          'ear-protection',
           'Hearing protection',
           'A hammer drill in concrete is louder than it feels.',
         ),
