@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { unitSystemSchema } from './exercises'
+import { unitSystemSchema } from './unitSystem'
 
 const displayNameSchema = z
   .string()

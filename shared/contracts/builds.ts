@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { coverDrawingSchema, sheetStageSchema } from './courses'
-import { stableKeySchema } from './exercises'
+import { stableKeySchema } from './stableKey'
 
 export const stageStateSchema = z.enum(['pencil', 'ink', 'signed'])
 export type StageState = z.infer<typeof stageStateSchema>

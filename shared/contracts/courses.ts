@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { stableKeySchema } from './exercises'
+import { stableKeySchema } from './stableKey'
 import { lessonStateSchema } from './progress'
 
 export const stageKindSchema = z.enum(['ground', 'base', 'frame', 'cladding', 'roof', 'finish'])

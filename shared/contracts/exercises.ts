@@ -1,10 +1,9 @@
 import { z } from 'zod'
+import { stableKeySchema } from './stableKey'
+import { unitSystemSchema } from './unitSystem'
 
-/** A key that names the same stage, lesson, stop, exercise or question in every revision of a course. */
-export const stableKeySchema = z.string().regex(/^[a-z0-9-]{3,40}$/)
-
-export const unitSystemSchema = z.enum(['metric', 'imperial'])
-export type UnitSystem = z.infer<typeof unitSystemSchema>
+export { stableKeySchema }
+export { unitSystemSchema, type UnitSystem } from './unitSystem'
 
 /** What a person typed into a field, kept as typed: `2.4 m`, `7' 10-1/2"`, `300`. */
 const typedValueSchema = z.string().trim().max(80)

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { stableKeySchema } from './exercises'
+import { stableKeySchema } from './stableKey'
 
 const markdownSchema = z
   .string()

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { coverDrawingSchema, hazardSchema, sheetStageSchema, stageKindSchema } from './courses'
-import { stableKeySchema } from './exercises'
+import { stableKeySchema } from './stableKey'
 import { videoSchema } from './media'
 import { kitStateSchema, lessonProgressSchema } from './progress'
 

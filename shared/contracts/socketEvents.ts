@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { stableKeySchema } from './exercises'
+import { stableKeySchema } from './stableKey'
 import { catchUpSchema, fenceEventSchema } from './fence'
 
 /** A lesson's room over the fence. */
