@@ -76,7 +76,7 @@ for (const { name, page } of firstPages) {
   const all = filesOf(chunksWithLater(manifest, [entry, page], common))
   const later = [...all].filter((file) => !files.has(file))
   console.log(
-    `  drawings that follow        ${((await weigh(later, '.js')) / kB).toFixed(1)} kB gzip`,
+    `  what may follow          ${((await weigh(later, '.js')) / kB).toFixed(1)} kB gzip`,
   )
 }
 const first = filesOf(
