@@ -19,6 +19,16 @@ const plainText = (text: string) =>
     .replace(/\s+/g, ' ')
     .trim()
 
+/** The player's parts that are used; the lesson page has controls of its own. */
+const parts = ['mediaLoader', 'posterImage', 'textTrackDisplay', 'resizeManager']
+
+/** The player without style elements of its own, which the page's security policy refuses. */
+async function loadPlayer() {
+  Object.assign(window, { VIDEOJS_NO_DYNAMIC_STYLE: true })
+  const { default: videojs } = await import('video.js/core')
+  return videojs
+}
+
 /**
  * Video.js in `container`, which gets a fresh element each time because the player takes its own
  * away when it is disposed of. The clock is read on every frame while it plays.
@@ -31,6 +41,8 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
   const hasCaptions = ref(false)
   const areCaptionsOn = ref(true)
   const speed = ref(1)
+  /** Counts the jumps over the tape. */
+  const jumps = ref(0)
   const cues = shallowRef<SpokenCue[]>([])
   let frame = 0
   let isGone = false
@@ -63,13 +75,14 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
   }
 
   async function start(source: Video, startMs: number) {
-    const { default: videojs } = await import('video.js/core')
+    const videojs = await loadPlayer()
     if (isGone || !container.value) return
     stop()
     const element = document.createElement('video-js')
     container.value.replaceChildren(element)
     const made = videojs(element, {
       controls: false,
+      children: parts,
       preload: 'auto',
       fill: true,
       playsinline: true,
@@ -105,6 +118,7 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
       readCues()
     })
     made.on('error', () => (hasFailed.value = true))
+    made.on('playerresize', layCaptions)
     made.textTracks().on('change', readCues)
     made.on('texttrackchange', readCues)
     made.on('loadeddata', readCues)
@@ -118,7 +132,20 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
     cues.value = []
   }
 
+  /** The captions are laid out for one size of the picture; another size needs them anew. */
+  function layCaptions() {
+    const display = player.value?.getChild('textTrackDisplay') as
+      { updateDisplay: () => void } | undefined
+    const tracks = player.value?.textTracks() as unknown as ArrayLike<{
+      activeCues: ArrayLike<{ hasBeenReset?: boolean }> | null
+    }>
+    for (const { activeCues } of Array.from(tracks ?? [])) {
+      for (const cue of Array.from(activeCues ?? [])) cue.hasBeenReset = true
+    }
+    display?.updateDisplay()
+  }
   function seek(atMs: number) {
+    jumps.value++
     positionMs.value = atMs
     player.value?.currentTime(atMs / 1000)
   }
@@ -152,6 +179,7 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
     hasCaptions,
     areCaptionsOn,
     speed,
+    jumps,
     cues,
     start,
     seek,

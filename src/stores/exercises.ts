@@ -4,6 +4,7 @@ import type { Step, Values } from '../../shared/calculators/calculator'
 import type { Answer, StopState, UnitSystem } from '../../shared/contracts/exercises'
 import { fetchStop, sendAttempt } from '../api/exercises'
 import { putInFieldBook } from '../api/builds'
+import { useAccountsStore } from './accounts'
 import { useLessonsStore } from './lessons'
 
 /** A calculator as far as it was worked, for the drawing and the steps beside the workbench. */
@@ -18,6 +19,7 @@ export interface WorkedCalculator {
 
 /** The stop at which the video waits: its exercise, the answer being typed, and the verdict. */
 export const useExercisesStore = defineStore('exercises', () => {
+  const accounts = useAccountsStore()
   const lessons = useLessonsStore()
   const state = shallowRef<StopState | null>(null)
   const worked = shallowRef<WorkedCalculator | null>(null)
@@ -27,7 +29,7 @@ export const useExercisesStore = defineStore('exercises', () => {
 
   async function open(stopKey: string) {
     close()
-    state.value = await fetchStop(lessons.place, stopKey)
+    state.value = await fetchStop(lessons.place, stopKey, accounts.units)
     return state.value
   }
 
@@ -36,10 +38,15 @@ export const useExercisesStore = defineStore('exercises', () => {
     if (!stop) return
     const body = JSON.stringify([stop.stopKey, answer])
     if (unsent?.body !== body) unsent = { body, key: crypto.randomUUID() }
-    const graded = await sendAttempt(lessons.place, stop.stopKey, answer, unsent.key)
+    const graded = await sendAttempt(
+      lessons.place,
+      { stopKey: stop.stopKey, units: accounts.units },
+      answer,
+      unsent.key,
+    )
     unsent = null
     state.value = graded.state
-    if (graded.state.solved) lessons.markSolved(stop.stopKey)
+    if (graded.state.solved) await lessons.markSolved(stop.stopKey)
   }
 
   /** Puts the solved calculator's numbers into the field book of the build, as typed. */
@@ -60,7 +67,7 @@ export const useExercisesStore = defineStore('exercises', () => {
   /** The same exercise in other words, after the person changed their units. */
   async function refresh() {
     const stopKey = state.value?.stopKey
-    if (stopKey) state.value = await fetchStop(lessons.place, stopKey)
+    if (stopKey) state.value = await fetchStop(lessons.place, stopKey, accounts.units)
   }
   function close() {
     state.value = null

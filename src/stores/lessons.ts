@@ -5,6 +5,8 @@ import type { LessonProgress } from '../../shared/contracts/progress'
 import { fetchLesson, type LessonPlace } from '../api/courses'
 import { tickKit as sendTicks } from '../api/progress'
 
+export type { LessonPlace } from '../api/courses'
+
 /** The lesson that is open, as the server last described it. */
 export const useLessonsStore = defineStore('lessons', () => {
   const place = ref<LessonPlace>({ slug: '', lessonKey: '', isDraft: false })
@@ -22,15 +24,31 @@ export const useLessonsStore = defineStore('lessons', () => {
     if (kitState.isComplete) lesson.value = await fetchLesson(place.value)
     else if (lesson.value) lesson.value = { ...lesson.value, kitState }
   }
+  /** Takes how far the lesson is, also along the story pole. */
   function takeProgress(progress: LessonProgress) {
-    if (lesson.value) lesson.value = { ...lesson.value, progress }
+    const open = lesson.value
+    if (!open) return
+    const stages = open.stages.map((stage) => ({
+      ...stage,
+      lessons: stage.lessons.map((other) =>
+        other.key === open.key ? { ...other, state: progress.state } : other,
+      ),
+    }))
+    lesson.value = { ...open, progress, stages }
   }
-  function markSolved(stopKey: string) {
-    if (!lesson.value) return
-    const stops = lesson.value.stops.map((stop) =>
+  /** A stop that is solved; the last one may have been what the lesson lacked. */
+  async function markSolved(stopKey: string) {
+    const open = lesson.value
+    if (!open) return
+    const stops = open.stops.map((stop) =>
       stop.key === stopKey ? { ...stop, isSolved: true } : stop,
     )
-    lesson.value = { ...lesson.value, stops }
+    lesson.value = { ...open, stops }
+    const isAllSolved = stops.every((stop) => stop.isSolved || !stop.isRequired)
+    if (!isAllSolved || !open.can.keepProgress || open.progress.state === 'done') return
+    const { progress } = await fetchLesson(place.value)
+    if (lesson.value?.key === open.key)
+      takeProgress({ ...progress, positionMs: open.progress.positionMs })
   }
   return { place, lesson, needsKitCheck, load, tickKit, takeProgress, markSolved }
 })
