@@ -12,7 +12,7 @@ export interface UploadListener {
   /** The line is down or the server does not answer; it is tried again. */
   onCut: () => void
   onDone: () => void
-  /** The server refused it, or all trying was in vain; `isFinal` when going on would not help. */
+  /** The server refused it; `isFinal` when going on would not help. */
   onRefused: (message: string, isFinal: boolean) => void
 }
 
@@ -44,13 +44,7 @@ const isDetailed = (error: Error | DetailedError): error is DetailedError =>
 
 function readRefusal(error: Error | DetailedError): { message: string; status: number } {
   const response = isDetailed(error) ? error.originalResponse : null
-  if (!response) {
-    return {
-      status: 0,
-      message:
-        'No signal reached the server. What has come in is kept there; go on when it is back.',
-    }
-  }
+  if (!response) return { status: 0, message: '' }
   const status = response.getStatus()
   try {
     const problem = problemSchema.parse(JSON.parse(response.getBody()))
@@ -90,6 +84,10 @@ export async function startVideoUpload(
     },
     onError: (error) => {
       const { status, message } = readRefusal(error)
+      if (status === 0) {
+        listener.onCut()
+        return
+      }
       listener.onRefused(message, isRefusal(status) && status !== 401 && status !== 429)
     },
   })

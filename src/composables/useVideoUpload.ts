@@ -2,6 +2,7 @@ import { useIntervalFn } from '@vueuse/core'
 import { computed, onMounted, ref, shallowRef, watch } from 'vue'
 import type { RememberedUpload } from '../api/uploads'
 import { showAmount, showTimeLeft } from '../components/media/uploadWords'
+import { asProblem } from '../api/client'
 import { useBenchLessonsStore } from '../stores/benchLessons'
 import { useMediaStore } from '../stores/media'
 import { useAction } from './useAction'
@@ -36,19 +37,23 @@ export function useVideoUpload(lessonId: number) {
   const clock = useIntervalFn(() => (now.value = Date.now()), 1000, { immediate: false })
   watch(isMoving, (moving) => (moving ? clock.resume() : clock.pause()), { immediate: true })
 
+  const isIn = computed(() => upload.value?.state === 'done')
   /** A line that is down leaves the page as it is; the next look may go through. */
-  const look = () => lessons.refresh().catch(() => undefined)
+  async function look() {
+    try {
+      await lessons.refresh()
+      if (isIn.value) media.dropUpload(lessonId)
+    } catch (error) {
+      if (!asProblem(error).isOffline) throw error
+    }
+  }
   const poll = useIntervalFn(() => void look(), pollMs, { immediate: false })
-  watch(isChecking, (checking) => (checking ? poll.resume() : poll.pause()), { immediate: true })
   watch(
-    () => upload.value?.state,
-    async (state) => {
-      if (state !== 'done') return
-      await look()
-      media.dropUpload(lessonId)
-    },
+    () => isChecking.value || isIn.value,
+    (waits) => (waits ? poll.resume() : poll.pause()),
     { immediate: true },
   )
+  watch(isIn, (now) => now && void look(), { immediate: true })
 
   const recall = async () => {
     remembered.value = await media.findRemembered(lessonId).catch(() => null)
@@ -73,6 +78,7 @@ export function useVideoUpload(lessonId: number) {
   return {
     ...{ upload, video, remembered, words, message, isMoving, isChecking },
     ...{ choose, pause, forget, forgetRemembered },
+    tryAgain: () => void media.tryAgain(lessonId),
     goOn: () => media.goOnWithUpload(lessonId),
     drop: () => media.dropUpload(lessonId),
   }

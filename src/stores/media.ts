@@ -1,3 +1,4 @@
+import { useEventListener } from '@vueuse/core'
 import { defineStore } from 'pinia'
 import { reactive } from 'vue'
 import { maxVideoBytes, type Cue, type UploadCaptionsQuery } from '../../shared/contracts/media'
@@ -93,6 +94,14 @@ export const useMediaStore = defineStore('media', () => {
     upload.since = { at: Date.now(), bytes: upload.sentBytes }
     handle.goOn()
   }
+  /** A line that is back, or thought to be: what waited for it goes on at once. */
+  async function tryAgain(lessonId: number) {
+    await handles.get(lessonId)?.pause()
+    goOnWithUpload(lessonId)
+  }
+  useEventListener(window, 'online', () => {
+    for (const [lessonId, { state }] of uploads) if (state === 'cut') void tryAgain(lessonId)
+  })
   async function forgetUpload(lessonId: number) {
     const handle = handles.get(lessonId)
     handles.delete(lessonId)
@@ -125,6 +134,7 @@ export const useMediaStore = defineStore('media', () => {
     startUpload,
     pauseUpload,
     goOnWithUpload,
+    tryAgain,
     forgetUpload,
     dropUpload,
     findRemembered: uploading.findRememberedUpload,
