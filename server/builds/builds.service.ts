@@ -1,3 +1,4 @@
+import { findCalculator } from '../../shared/calculators'
 import type { Build, BuildRow, StageState } from '../../shared/contracts/builds'
 import type { SheetLesson, SheetStage } from '../../shared/contracts/courses'
 import type { Page, PageQuery } from '../../shared/contracts/pagination'
@@ -61,7 +62,7 @@ async function listLately(
     })),
     ...entries.map(({ createdAt, calculator, lessonKey }) => ({
       at: createdAt,
-      text: `“${calculator}” put in the field book`,
+      text: `“${findCalculator(calculator)?.title ?? calculator}” put in the field book`,
       lessonKey,
     })),
   ]
