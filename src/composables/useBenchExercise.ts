@@ -37,13 +37,19 @@ export function useBenchExercise(
     }))
     const isWhole = readDraft(exercise.value) !== null
     const found = isWhole && read.value ? findExerciseProblems(read.value) : []
-    const isSaid = (path: string) => unfinished.some((note) => note.path.startsWith(path))
+    /** A row that is unfinished says so itself. */
+    const isSaid = (path: string) =>
+      unfinished.some((note) => note.path === path || note.path === `${path}.text`)
     return [...unfinished, ...found.filter(({ path }) => !isSaid(path))]
   })
   const notes = computed(() => {
     const own = notesOf(problems.value)
+    /** What stands deeper is said there, not at the whole as well. */
+    const isDeeper = (path: string) =>
+      problems.value.some((note) => note.blocking && note.path.startsWith(`${path}.`))
     return {
-      error: (path: string) => own.error(path) || serverError(`exercise.${path}`),
+      error: (path: string) =>
+        own.error(path) || (isDeeper(path) ? '' : serverError(`exercise.${path}`)),
       hint: own.hint,
     }
   })
