@@ -1,4 +1,4 @@
-import { useMediaQuery } from '@vueuse/core'
+import { useDebounceFn, useMediaQuery } from '@vueuse/core'
 import { computed, watch, type Ref } from 'vue'
 import { settleOn } from '../components/courses/tapeScale'
 
@@ -12,6 +12,8 @@ interface Sliding {
 const pxPerMinute = 72
 const leastWidth = 640
 const settleReachMs = 800
+/** Without a scroll for this long the tape has come to rest. */
+const restMs = 150
 
 /**
  * On a phone the tape slides under a fixed pointer at 72 px a minute (a short lesson is stretched to
@@ -22,9 +24,11 @@ export function useTapeSliding(scroller: Ref<HTMLElement | null>, sliding: Slidi
   const runWidth = computed(() =>
     isPhone.value ? Math.max(leastWidth, (sliding.durationMs() / 60_000) * pxPerMinute) : 0,
   )
-  /** Where we put the tape ourselves; anything else is a finger. */
+  /** Where the tape was put to follow the video. */
   let ownLeft = 0
+  /** A finger or wheel has moved the tape; and the finger is still on it. */
   let isTouched = false
+  let isHeld = false
 
   const toLeft = (atMs: number) => (atMs / sliding.durationMs()) * runWidth.value
 
@@ -36,15 +40,36 @@ export function useTapeSliding(scroller: Ref<HTMLElement | null>, sliding: Slidi
   }
   watch([sliding.positionMs, runWidth, scroller], follow, { flush: 'post', immediate: true })
 
-  function onScroll() {
-    const left = scroller.value?.scrollLeft ?? 0
-    if (runWidth.value && Math.abs(left - ownLeft) > 2) isTouched = true
-  }
-  function onScrollEnd() {
-    if (!isTouched || !scroller.value) return
+  const settle = useDebounceFn(() => {
+    if (isHeld || !isTouched || !scroller.value) return
     isTouched = false
-    const atMs = (scroller.value.scrollLeft / runWidth.value) * sliding.durationMs()
+    const left = scroller.value.scrollLeft
+    if (!runWidth.value || Math.abs(left - ownLeft) <= 2) return
+    const atMs = (left / runWidth.value) * sliding.durationMs()
     sliding.seek(Math.round(settleOn(atMs, sliding.settleAt(), settleReachMs)))
+  }, restMs)
+  function onScroll() {
+    if (isTouched) void settle()
   }
-  return { runWidth, onScroll, onScrollEnd }
+  function onHold() {
+    isHeld = isTouched = true
+  }
+  function onRelease() {
+    isHeld = false
+    void settle()
+  }
+  function onWheel() {
+    isTouched = true
+    void settle()
+  }
+  return {
+    runWidth,
+    handlers: {
+      scroll: onScroll,
+      touchstart: onHold,
+      touchend: onRelease,
+      touchcancel: onRelease,
+      wheel: onWheel,
+    },
+  }
 }

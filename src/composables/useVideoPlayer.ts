@@ -46,6 +46,8 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
   const cues = shallowRef<SpokenCue[]>([])
   let frame = 0
   let isGone = false
+  /** Play was pressed before the player had come. */
+  let isAwaited = false
 
   function readClock() {
     const seconds = player.value?.currentTime()
@@ -122,6 +124,7 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
     made.textTracks().on('change', readCues)
     made.on('texttrackchange', readCues)
     made.on('loadeddata', readCues)
+    if (isAwaited) void play()
   }
   function stop() {
     cancelAnimationFrame(frame)
@@ -134,12 +137,13 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
 
   /** The captions are laid out for one size of the picture; another size needs them anew. */
   function layCaptions() {
-    const display = player.value?.getChild('textTrackDisplay') as
-      { updateDisplay: () => void } | undefined
-    const tracks = player.value?.textTracks() as unknown as ArrayLike<{
+    const made = player.value
+    if (!made) return
+    const display = made.getChild('textTrackDisplay') as { updateDisplay: () => void } | undefined
+    const tracks = made.textTracks() as unknown as ArrayLike<{
       activeCues: ArrayLike<{ hasBeenReset?: boolean }> | null
     }>
-    for (const { activeCues } of Array.from(tracks ?? [])) {
+    for (const { activeCues } of Array.from(tracks)) {
       for (const cue of Array.from(activeCues ?? [])) cue.hasBeenReset = true
     }
     display?.updateDisplay()
@@ -150,9 +154,13 @@ export function useVideoPlayer(container: Ref<HTMLElement | null>, video: () => 
     player.value?.currentTime(atMs / 1000)
   }
   async function play() {
+    isAwaited = player.value === null
     await Promise.resolve(player.value?.play()).catch(() => undefined)
   }
-  const pause = () => player.value?.pause()
+  function pause() {
+    isAwaited = false
+    player.value?.pause()
+  }
   function setSpeed(value: number) {
     speed.value = value
     player.value?.playbackRate(value)

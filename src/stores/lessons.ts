@@ -46,8 +46,8 @@ export const useLessonsStore = defineStore('lessons', () => {
     lesson.value = { ...open, stops }
     const isAllSolved = stops.every((stop) => stop.isSolved || !stop.isRequired)
     if (!isAllSolved || !open.can.keepProgress || open.progress.state === 'done') return
-    const { progress } = await fetchLesson(place.value)
-    if (lesson.value?.key === open.key)
+    const { key, progress } = await fetchLesson(place.value)
+    if (key === lesson.value.key)
       takeProgress({ ...progress, positionMs: open.progress.positionMs })
   }
   return { place, lesson, needsKitCheck, load, tickKit, takeProgress, markSolved }
