@@ -11,6 +11,8 @@ import { defineConfig } from 'vitest/config'
 const clientFolder = 'dist/client'
 const compressedKinds = new Set(['.js', '.css', '.html', '.svg', '.json', '.vtt'])
 const smallestCompressedBytes = 1024
+/** No test is about speed; a busy machine may take this long over one. */
+const patience = 60_000
 
 /** Writes a .br and a .gz file beside every text asset, so that the server compresses nothing. */
 function precompress(folder: string): Plugin {
@@ -55,7 +57,12 @@ export default defineConfig(({ isSsrBuild }) => ({
     unstubGlobals: true,
     projects: [
       {
-        test: { name: 'shared', environment: 'node', include: ['tests/shared/**/*.test.ts'] },
+        test: {
+          name: 'shared',
+          environment: 'node',
+          include: ['tests/shared/**/*.test.ts'],
+          testTimeout: patience,
+        },
       },
       {
         extends: true,
@@ -63,6 +70,7 @@ export default defineConfig(({ isSsrBuild }) => ({
           name: 'client',
           environment: 'happy-dom',
           include: ['tests/src/**/*.test.ts'],
+          testTimeout: patience,
           server: { deps: { inline: ['quasar'] } },
         },
       },
@@ -74,7 +82,7 @@ export default defineConfig(({ isSsrBuild }) => ({
           globalSetup: ['tests/support/globalSetup.ts'],
           setupFiles: ['tests/support/serverSetup.ts'],
           fileParallelism: false,
-          testTimeout: 20_000,
+          testTimeout: patience,
           hookTimeout: 60_000,
         },
       },
