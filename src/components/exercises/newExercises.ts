@@ -87,7 +87,7 @@ export const newCalculatorExercise = (system: UnitSystem): CalculatorDraft => ({
 })
 
 const twoChoices = () => [
-  { id: 'a', text: '', right: true, feedback: '' },
+  { id: 'a', text: '', right: false, feedback: '' },
   { id: 'b', text: '', right: false, feedback: '' },
 ]
 
