@@ -8,17 +8,15 @@ interface Which {
   key: string
 }
 
-/** Takes the key for this transaction; false when another request took it before. */
-export async function insertIdempotencyKey(which: Which, fingerprint: string, tx: Transaction) {
-  const [result] = await tx
+/**
+ * Takes the key for this transaction, or waits for the one that has it; a key of old stays as it is.
+ * Unlike `insert ignore` this asks for the whole lock at once, so that two who wait do not block each other.
+ */
+export async function holdIdempotencyKey(which: Which, fingerprint: string, tx: Transaction) {
+  await tx
     .insert(idempotencyKeys)
-    .ignore()
     .values({ ...which, fingerprint })
-  return result.affectedRows === 1
-}
-
-/** The key as the request that took it left it. */
-export async function findIdempotencyKey(which: Which, tx: Transaction) {
+    .onDuplicateKeyUpdate({ set: { id: sql`${idempotencyKeys.id}` } })
   const [row] = await tx
     .select()
     .from(idempotencyKeys)
@@ -30,7 +28,8 @@ export async function findIdempotencyKey(which: Which, tx: Transaction) {
       ),
     )
     .for('update')
-  return row ?? null
+  if (!row) throw new Error('the key was not kept')
+  return row
 }
 
 /** Keeps the answer that was given under the key. */

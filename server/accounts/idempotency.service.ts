@@ -2,11 +2,7 @@ import { createHash } from 'node:crypto'
 import type { Transaction } from '../db/client'
 import { inTransaction } from '../db/transaction'
 import { AppError, invalid } from '../errors'
-import {
-  findIdempotencyKey,
-  insertIdempotencyKey,
-  updateIdempotencyKey,
-} from './idempotency.queries'
+import { holdIdempotencyKey, updateIdempotencyKey } from './idempotency.queries'
 
 interface Repeatable {
   userId: number
@@ -23,6 +19,24 @@ interface Given<T> {
   isFirst: boolean
 }
 
+/** Bytes that the column for a route holds. */
+const longestRoute = 80
+
+/** A route's name as the table holds it: what is too long is told apart by its digest. */
+function nameRoute(route: string): string {
+  if (route.length <= longestRoute) return route
+  const digest = createHash('sha256').update(route).digest('base64url')
+  return `${route.slice(0, longestRoute - digest.length - 1)} ${digest}`
+}
+
+/** The key as it came, once it has the shape of one; 400 otherwise. */
+export function checkKey(key: string | undefined): string {
+  if (key && /^[\w-]{8,64}$/.test(key)) return key
+  throw invalid([
+    { field: 'Idempotency-Key', message: 'Send a key of 8 to 64 letters, digits or dashes.' },
+  ])
+}
+
 /**
  * Does `work` once for a key, and gives its stored answer to every repetition. The key, the work and
  * the answer share one transaction; a repetition that comes meanwhile waits for it.
@@ -32,23 +46,19 @@ export async function answerOnce<T>(
   { userId, route, key, payload }: Repeatable,
   work: (tx: Transaction) => Promise<{ status: number; response: T }>,
 ): Promise<Given<T>> {
-  if (!key || !/^[\w-]{8,64}$/.test(key)) {
-    throw invalid([
-      { field: 'Idempotency-Key', message: 'Send a key of 8 to 64 letters, digits or dashes.' },
-    ])
-  }
-  const which = { userId, route, key }
+  const which = { userId, route: nameRoute(route), key: checkKey(key) }
   const fingerprint = createHash('sha256').update(JSON.stringify(payload)).digest('hex')
   return inTransaction(async (tx) => {
-    if (await insertIdempotencyKey(which, fingerprint, tx)) {
+    const held = await holdIdempotencyKey(which, fingerprint, tx)
+    if (held.fingerprint !== fingerprint) {
+      throw new AppError(422, 'key-used', 'This key was used for something else already.')
+    }
+    // An answer is stored in the transaction that took the key: without one, that is this transaction.
+    if (held.status === null) {
       const answer = await work(tx)
       await updateIdempotencyKey(which, answer, tx)
       return { ...answer, isFirst: true }
     }
-    const earlier = await findIdempotencyKey(which, tx)
-    if (earlier?.fingerprint !== fingerprint || earlier.status === null) {
-      throw new AppError(422, 'key-used', 'This key was used for something else already.')
-    }
-    return { status: earlier.status, response: earlier.response as T, isFirst: false }
+    return { status: held.status, response: held.response as T, isFirst: false }
   })
 }
