@@ -87,6 +87,7 @@ export function createApp({ devClient }: AppOptions = {}): Express {
   app.use('/api', errorHandler)
 
   app.use(devClient ?? clientPage(config.clientDir))
+  app.use(apiNotFound)
   app.use(errorHandler)
   return app
 }

@@ -1,4 +1,4 @@
-import { createServer } from 'node:http'
+import { createServer, type Server } from 'node:http'
 import { createApp } from './app'
 import { sweepSessions } from './accounts/sessions.service'
 import { config } from './config'
@@ -9,15 +9,21 @@ import { createSocketServer } from './socket'
 
 const hardStopMs = 10_000
 
-async function createDevClient() {
+/** Vite's hot reload speaks through our own server: a port of its own would clash with a second one. */
+async function createDevClient(server: Server) {
   if (config.isProduction || config.isTest) return undefined
   const { createServer: createVite } = await import('vite')
-  const vite = await createVite({ server: { middlewareMode: true }, appType: 'spa' })
+  const vite = await createVite({
+    server: { middlewareMode: true, hmr: { server } },
+    appType: 'spa',
+  })
   return vite.middlewares
 }
 
-const devClient = await createDevClient()
-const httpServer = createServer(createApp(devClient ? { devClient } : {}))
+const httpServer = createServer()
+const devClient = await createDevClient(httpServer)
+const app = createApp(devClient ? { devClient } : {})
+httpServer.on('request', (request, response) => void app(request, response))
 httpServer.requestTimeout = 0
 const io = createSocketServer(httpServer)
 startJobs()
@@ -39,7 +45,7 @@ httpServer.listen(config.port, () => {
 })
 
 let isStopping = false
-async function stop() {
+async function stop(exitCode = 0) {
   if (isStopping) return
   isStopping = true
   setTimeout(() => process.exit(1), hardStopMs).unref()
@@ -51,8 +57,16 @@ async function stop() {
   await closed
   await stopJobs()
   await pool.end()
-  process.exit(0)
+  process.exit(exitCode)
 }
 process.on('SIGTERM', () => void stop())
 process.on('SIGINT', () => void stop())
 process.on('disconnect', () => void stop())
+
+/** The last resort: what nobody foresaw is written down, and the process ends in order to be started anew. */
+function giveUp(error: unknown) {
+  logger.fatal({ err: error }, 'unforeseen')
+  stop(1).catch(() => process.exit(1))
+}
+process.on('uncaughtException', giveUp)
+process.on('unhandledRejection', giveUp)

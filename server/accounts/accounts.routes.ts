@@ -1,8 +1,9 @@
 import { Router } from 'express'
 import { changeAccountSchema, signInSchema, signUpSchema } from '../../shared/contracts/accounts'
+import { audit } from '../middleware/audit'
 import { authorize } from '../middleware/authorize'
 import { requireActor } from '../middleware/authenticate'
-import { limitRate } from '../middleware/rateLimit'
+import { byAccount, byAddress, limitRate } from '../middleware/rateLimit'
 import { endSession, startSession } from '../middleware/session'
 import { readBody } from '../middleware/validate'
 import { changeAccount, describeMe, openBench, signIn, signUp } from './accounts.service'
@@ -14,11 +15,16 @@ accountsRouter.get('/accounts/me', async (request, response) => {
   response.json({ user: request.actor ? await describeMe(request.actor.id) : null })
 })
 
-accountsRouter.post('/accounts', limitRate('sign-up', 10, 15), async (request, response) => {
-  const userId = await signUp(readBody(request, signUpSchema))
-  await startSession(request, userId)
-  response.status(201).json({ user: await describeMe(userId) })
-})
+accountsRouter.post(
+  '/accounts',
+  audit('sign-up'),
+  limitRate('sign-up', 10, 15, byAddress),
+  async (request, response) => {
+    const userId = await signUp(readBody(request, signUpSchema))
+    await startSession(request, userId)
+    response.status(201).json({ user: await describeMe(userId) })
+  },
+)
 
 accountsRouter.patch('/accounts/me', authorize('account:change'), async (request, response) => {
   const { id } = requireActor(request)
@@ -36,19 +42,30 @@ accountsRouter.post(
   },
 )
 
-accountsRouter.post('/sessions', limitRate('sign-in', 20, 15), async (request, response) => {
-  const userId = await signIn(readBody(request, signInSchema))
-  await startSession(request, userId)
-  response.status(201).json({ user: await describeMe(userId) })
-})
+accountsRouter.post(
+  '/sessions',
+  audit('sign-in'),
+  limitRate('sign-in', 20, 15, byAddress),
+  limitRate('sign-in-account', 100, 60, byAccount),
+  async (request, response) => {
+    const userId = await signIn(readBody(request, signInSchema))
+    await startSession(request, userId)
+    response.status(201).json({ user: await describeMe(userId) })
+  },
+)
 
-accountsRouter.delete('/sessions/current', async (request, response) => {
+accountsRouter.delete('/sessions/current', audit('sign-out'), async (request, response) => {
   await endSession(request, response)
   response.status(204).end()
 })
 
-accountsRouter.delete('/sessions', authorize('account:change'), async (request, response) => {
-  await endAllSessions(requireActor(request).id)
-  await endSession(request, response)
-  response.status(204).end()
-})
+accountsRouter.delete(
+  '/sessions',
+  audit('sign-out-everywhere'),
+  authorize('account:change'),
+  async (request, response) => {
+    await endAllSessions(requireActor(request).id)
+    await endSession(request, response)
+    response.status(204).end()
+  },
+)

@@ -11,10 +11,11 @@ import {
   updateUser,
   type UserRow,
 } from './accounts.queries'
+import { isEasilyGuessed } from './commonPassphrases'
 import { hashPassphrase, isOutdatedHash, isPassphrase } from './passwords'
 
 /** A session ends at the latest this long after its sign-in. */
-const absoluteLimitMs = 30 * 24 * 3600_000
+export const absoluteLimitMs = 30 * 24 * 3600_000
 
 /** The signed-in person as the server's own code sees them. */
 export type SignedIn = Pick<UserRow, 'id' | 'role' | 'displayName' | 'units'>
@@ -30,8 +31,18 @@ export async function findSignedIn(userId: number): Promise<SignedIn | null> {
   return { id: user.id, role: user.role, displayName: user.displayName, units: user.units }
 }
 
-/** Makes an account and returns its id; 409 when the address has one already. */
+/** Makes an account and returns its id; 400 for a passphrase that is guessed first, 409 when the address has one already. */
 export async function signUp(input: SignUp): Promise<number> {
+  const ownWords = [...input.email.split(/[@.]/), ...input.displayName.split(/\s+/)]
+  if (isEasilyGuessed(input.passphrase, ownWords)) {
+    throw invalid([
+      {
+        field: 'passphrase',
+        message:
+          'This one is tried first by whoever guesses. Take four words that only you put together.',
+      },
+    ])
+  }
   const passwordHash = await hashPassphrase(input.passphrase)
   try {
     return await insertUser({

@@ -1,6 +1,9 @@
-import { and, eq, gt, lt, ne } from 'drizzle-orm'
+import { and, eq, gt, inArray, lt, ne, or } from 'drizzle-orm'
 import { db } from '../db/client'
 import { sessions } from '../db/schema'
+
+/** Ended sessions that one sweep clears away. */
+const sweptAtOnce = 5000
 
 /** A session's data while it is alive, or null. */
 export async function findSession(sid: string) {
@@ -11,18 +14,25 @@ export async function findSession(sid: string) {
   return row ?? null
 }
 
-/** Keeps a session, new or known. */
-export async function upsertSession(row: {
+interface SessionRow {
   sid: string
   userId: number | null
   data: string
   expiresAt: Date
-}) {
+}
+
+/** Keeps a session that has just begun. */
+export async function upsertSession(row: SessionRow) {
   const { sid, ...rest } = row
   await db
     .insert(sessions)
     .values(row)
     .onDuplicateKeyUpdate({ set: { ...rest, sid } })
+}
+
+/** Keeps what changed in a session that is still there. */
+export async function updateSession({ sid, ...rest }: SessionRow) {
+  await db.update(sessions).set(rest).where(eq(sessions.sid, sid))
 }
 
 /** Moves the moment at which an unused session ends. */
@@ -43,7 +53,15 @@ export async function deleteSessionsOf(userId: number, exceptSid = ''): Promise<
   return rows.map((row) => row.sid)
 }
 
-/** Forgets sessions that have ended. */
-export async function deleteOldSessions() {
-  await db.delete(sessions).where(lt(sessions.expiresAt, new Date()))
+/** Forgets sessions that were not used for too long or began before `begunBefore`; returns their ids. */
+export async function deleteOldSessions(begunBefore: Date): Promise<string[]> {
+  const isOver = or(lt(sessions.expiresAt, new Date()), lt(sessions.createdAt, begunBefore))
+  const rows = await db
+    .select({ sid: sessions.sid })
+    .from(sessions)
+    .where(isOver)
+    .limit(sweptAtOnce)
+  const sids = rows.map((row) => row.sid)
+  if (sids.length > 0) await db.delete(sessions).where(and(inArray(sessions.sid, sids), isOver))
+  return sids
 }

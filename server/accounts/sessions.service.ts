@@ -1,3 +1,5 @@
+import { absoluteLimitMs } from './accounts.service'
+import { deleteOldIdempotencyKeys } from './idempotency.queries'
 import { deleteOldRateLimits } from './rateLimits.queries'
 import { deleteOldSessions, deleteSessionsOf } from './sessions.queries'
 
@@ -19,8 +21,9 @@ export async function endAllSessions(userId: number) {
   tellSessionsEnded(await deleteSessionsOf(userId))
 }
 
-/** Forgets sessions and rate limits that are over. */
+/** Ends sessions that are past a limit, with their sockets, and forgets rate limits and keys that are over. */
 export async function sweepSessions() {
-  await deleteOldSessions()
+  tellSessionsEnded(await deleteOldSessions(new Date(Date.now() - absoluteLimitMs)))
   await deleteOldRateLimits()
+  await deleteOldIdempotencyKeys()
 }

@@ -20,8 +20,11 @@ function sendProblem(response: Response, error: AppError) {
 function fromHttpError(error: unknown): AppError | null {
   const { status, type } = error as { status?: unknown; type?: unknown }
   if (typeof status !== 'number' || status < 400 || status > 499) return null
-  if (type === 'entity.too.large')
-    return new AppError(413, 'too-large', 'This is too large to send.')
+  if (type === 'entity.too.large') {
+    return new AppError(413, 'too-large', 'This is too large to send.', {
+      errors: [{ field: '', message: 'Send less at once.' }],
+    })
+  }
   if (type === 'entity.parse.failed') {
     return new AppError(400, 'not-json', 'The request is not JSON that can be read.', {
       errors: [{ field: '', message: 'Send JSON.' }],

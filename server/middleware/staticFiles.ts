@@ -20,7 +20,7 @@ function preferCompressed(folder: string): RequestHandler {
     const path = request.path
     const extension = /\.\w+$/.exec(path)?.[0] ?? ''
     const type = contentTypes[extension]
-    if (!type || path.includes('..')) return next()
+    if (!type || /\.\.|\/\./.test(path)) return next()
     response.vary('Accept-Encoding')
     const accepted = request.acceptsEncodings('br', 'gzip')
     const encoding = encodings.find(({ name }) => name === accepted)

@@ -1,15 +1,25 @@
 import type { Request } from 'express'
 import type { z } from 'zod'
+import type { FieldError } from '../../shared/contracts/errors'
 import { AppError } from '../errors'
+import { sayIssue } from './issueSentences'
+
+const mostErrors = 50
+
+/** One error for each field; a name that the contract does not know is a field of its own. */
+const toErrors = (issue: z.core.$ZodIssue): FieldError[] => {
+  const paths = issue.code === 'unrecognized_keys' ? issue.keys : [null]
+  return paths.map((key) => ({
+    field: [...issue.path, ...(key === null ? [] : [key])].map(String).join('.').slice(0, 200),
+    message: issue.message,
+  }))
+}
 
 function read<T extends z.ZodType>(schema: T, value: unknown, status: number): z.output<T> {
-  const result = schema.safeParse(value)
+  const result = schema.safeParse(value, { error: sayIssue })
   if (result.success) return result.data
   throw new AppError(status, 'invalid', 'Some of this cannot be taken as it is.', {
-    errors: result.error.issues.slice(0, 50).map((issue) => ({
-      field: issue.path.map(String).join('.'),
-      message: issue.message,
-    })),
+    errors: result.error.issues.flatMap(toErrors).slice(0, mostErrors),
   })
 }
 
