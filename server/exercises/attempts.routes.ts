@@ -2,7 +2,7 @@ import { Router, type Request } from 'express'
 import { z } from 'zod'
 import { answerSchema, unitSystemSchema } from '../../shared/contracts/exercises'
 import { authorizeLesson, lessonOf } from '../middleware/courseAccess'
-import { limitRate } from '../middleware/rateLimit'
+import { limitRate, limitVisitors } from '../middleware/rateLimit'
 import { readBody, readParams, readQuery } from '../middleware/validate'
 import { answerStop, describeStop } from './attempts.service'
 
@@ -20,9 +20,14 @@ const readStop = (request: Request) => ({
 
 export const attemptsRouter = Router()
 
-attemptsRouter.get(stopPath, authorizeLesson('stop:answer'), async (request, response) => {
-  response.json(await describeStop(readStop(request)))
-})
+attemptsRouter.get(
+  stopPath,
+  authorizeLesson('stop:answer'),
+  limitVisitors,
+  async (request, response) => {
+    response.json(await describeStop(readStop(request)))
+  },
+)
 
 attemptsRouter.post(
   `${stopPath}/attempts`,

@@ -8,15 +8,16 @@ import type {
 } from '../../shared/contracts/exercises'
 import { gradeExercise, shownAnswer, toLearnerExercise } from '../../shared/grading'
 import type { Actor } from '../../shared/contracts/policies'
-import { answerOnce } from '../accounts/idempotency.service'
+import { answerOnce, checkKey } from '../accounts/idempotency.service'
 import { recordKeeper, type LessonAccess } from '../courses/access.service'
-import { invalid, notFound } from '../errors'
+import { notFound } from '../errors'
 import {
   findLessonDurationMs,
   openProgress,
   settleLesson,
 } from '../progress/lessonProgress.service'
 import { findLastAttempt, findStopExercise, insertAttempt } from './attempts.queries'
+import { checkAnswer } from './checkAnswer'
 import { answerRemembered, openRemembered, type RememberedStops } from './rememberedStops'
 import { openStopState, sessionNameOf } from './stopStates.service'
 import { lockStopState, updateStopState } from './stopStates.queries'
@@ -112,9 +113,7 @@ export async function answerStop(
   key: string | undefined,
 ): Promise<GradedAttempt> {
   const { exerciseId, exercise } = await findExercise(at)
-  if (answer.kind !== exercise.kind) {
-    throw invalid([{ field: 'kind', message: `This stop takes an answer to a ${exercise.kind}.` }])
-  }
+  checkAnswer(exercise, answer)
   const units = answer.kind === 'calculator' ? answer.units : unitsOf(at)
   const grade = (before: Standing, costsTry = true) => {
     const verdict = gradeExercise(exercise, answer, before.seed)
@@ -124,7 +123,8 @@ export async function answerStop(
   }
   const userId = recordKeeper(at.access, at.actor)
   if (userId === null) {
-    return answerRemembered(at.remembered, sessionNameOf(at.access, at.stopKey), key, grade)
+    const name = sessionNameOf(at.access, at.stopKey)
+    return answerRemembered(at.remembered, name, key === undefined ? key : checkKey(key), grade)
   }
 
   const person = personAt(at, userId)

@@ -2,6 +2,7 @@ import { Router } from 'express'
 import { reportProgressSchema, tickKitSchema } from '../../shared/contracts/progress'
 import { requireActor } from '../middleware/authenticate'
 import { authorizeCourse, authorizeLesson, courseOf, lessonOf } from '../middleware/courseAccess'
+import { limitVisitors } from '../middleware/rateLimit'
 import { readBody } from '../middleware/validate'
 import { enrol } from './enrolments.service'
 import { reportLesson, tickLessonKit } from './watching.service'
@@ -20,6 +21,7 @@ progressRouter.post(
 progressRouter.put(
   '/courses/:slug/lessons/:lessonKey/kit-ticks',
   authorizeLesson('lesson:watch'),
+  limitVisitors,
   async (request, response) => {
     const { ticked } = readBody(request, tickKitSchema)
     const remembered = (request.session.kit ??= {})

@@ -5,8 +5,8 @@ import { notAllowed } from '../errors'
 import { tickKit } from './kitChecks.service'
 import { reportProgress } from './lessonProgress.service'
 
-/** Other lessons whose ticks one session remembers. */
-const maxRemembered = 60
+/** Other lessons whose ticks one session remembers; what it holds must fit its column. */
+const maxRemembered = 20
 
 /** Ticks rows of a lesson's kit check: kept for the enrolled, remembered by the session for all others. */
 export async function tickLessonKit(
