@@ -1,4 +1,4 @@
-import { and, desc, eq, like, lt, max, sql } from 'drizzle-orm'
+import { and, desc, eq, inArray, isNotNull, like, lt, max, sql } from 'drizzle-orm'
 import { db, type Executor, type Transaction } from '../db/client'
 import {
   courseRevisions,
@@ -87,8 +87,13 @@ export async function openCourse(id: number, tx: Transaction) {
     .where(and(eq(courses.id, id), eq(courses.state, 'draft')))
 }
 
-/** Removes a course with all that hangs on it. */
+/** Removes a course with all that hangs on it; a settled question would hold on to its answer. */
 export async function deleteCourse(id: number, tx: Transaction) {
+  const rooms = tx.select({ id: fenceRooms.id }).from(fenceRooms).where(eq(fenceRooms.courseId, id))
+  await tx
+    .update(questions)
+    .set({ state: 'open', settledAnswerId: null })
+    .where(and(inArray(questions.roomId, rooms), isNotNull(questions.settledAnswerId)))
   await tx.delete(courses).where(eq(courses.id, id))
 }
 
