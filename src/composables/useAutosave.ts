@@ -1,4 +1,10 @@
-import { tryOnScopeDispose, useDebounceFn, useEventListener, useLocalStorage } from '@vueuse/core'
+import {
+  tryOnScopeDispose,
+  useDebounceFn,
+  useEventListener,
+  useLocalStorage,
+  useTimeoutFn,
+} from '@vueuse/core'
 import { computed, reactive, ref, watch } from 'vue'
 import { asProblem, type ApiProblem } from '../api/client'
 import type { SaveState } from './useSavedField'
@@ -20,6 +26,8 @@ interface Unsent<T> {
 }
 
 const pauseMs = 700
+/** A server that is away for a moment tells nobody when it is back. */
+const againMs = 5000
 const same = (a: unknown, b: unknown) => JSON.stringify(a) === JSON.stringify(b)
 const copy = <V>(value: V): V => JSON.parse(JSON.stringify(value)) as V
 const isEmpty = (value: object) => Object.keys(value).length === 0
@@ -32,11 +40,14 @@ const fieldOf = (path: string) => path.split('.')[0] ?? path
  * changed here too: then it is said what they wrote.
  */
 export function useAutosave<T extends object>({ name, initial, version, save }: Autosave<T>) {
+  const storageKey = `gf-unsent:${name}`
   const unsent = useLocalStorage<Unsent<T>>(
-    `gf-unsent:${name}`,
+    storageKey,
     { changes: {}, before: {} },
     { listenToStorageChanges: false },
   )
+  /** Fields this page has written there; another window of this device has its own. */
+  let own = new Set(Object.keys(unsent.value.changes))
   const base = ref(copy(initial)) as { value: T }
   const form = reactive(copy({ ...initial, ...unsent.value.changes })) as T
   const keys = Object.keys(initial) as (keyof T)[]
@@ -50,6 +61,7 @@ export function useAutosave<T extends object>({ name, initial, version, save }: 
   let current = version
   let isSending = false
   let isWaiting = false
+  let isGone = false
 
   const changes = computed(() => {
     const changed: Partial<T> = {}
@@ -61,7 +73,21 @@ export function useAutosave<T extends object>({ name, initial, version, save }: 
     const kept = changes.value
     const before: Partial<T> = {}
     for (const key of Object.keys(kept) as (keyof T)[]) before[key] = base.value[key]
-    unsent.value = copy({ changes: kept, before })
+    const others = readOthers()
+    unsent.value = copy({
+      changes: { ...others.changes, ...kept },
+      before: { ...others.before, ...before },
+    })
+    own = new Set(Object.keys(kept))
+  }
+
+  /** What other windows have left there. */
+  function readOthers(): Unsent<T> {
+    const text = localStorage.getItem(storageKey)
+    const stored = text ? (JSON.parse(text) as Unsent<T>) : { changes: {}, before: {} }
+    const without = (part: Partial<T>) =>
+      Object.fromEntries(Object.entries(part).filter(([key]) => !own.has(key))) as Partial<T>
+    return { changes: without(stored.changes), before: without(stored.before) }
   }
 
   /** Says what somebody else wrote where something was typed here as well. */
@@ -146,8 +172,10 @@ export function useAutosave<T extends object>({ name, initial, version, save }: 
     }
     isSending = false
     keep()
+    if (state.value === 'offline' && !isGone) again.start()
   }
 
+  const again = useTimeoutFn(() => void saveNow(), againMs, { immediate: false })
   const saveSoon = useDebounceFn(saveNow, pauseMs)
   watch(
     changes,
@@ -160,7 +188,10 @@ export function useAutosave<T extends object>({ name, initial, version, save }: 
     { deep: true },
   )
   useEventListener(window, 'online', () => void saveNow())
-  tryOnScopeDispose(() => void saveNow())
+  tryOnScopeDispose(() => {
+    isGone = true
+    void saveNow()
+  })
   if (!isEmpty(unsent.value.changes)) {
     compare(initial, unsent.value.before, unsent.value.changes)
     void saveNow()

@@ -1,4 +1,4 @@
-import { computed, ref } from 'vue'
+import { computed, nextTick, ref } from 'vue'
 import type { z } from 'zod'
 import { asProblem, type ApiProblem } from '../api/client'
 
@@ -19,6 +19,12 @@ export function useForm<T extends z.ZodType>(
     problem.value && Object.keys(errors.value).length === 0 ? problem.value.message : '',
   )
 
+  /** The first field in question gets the focus, and with it its reason is read out. */
+  async function showFirst() {
+    await nextTick()
+    document.querySelector<HTMLElement>('main form [aria-invalid="true"]')?.focus()
+  }
+
   async function submit() {
     errors.value = {}
     problem.value = null
@@ -27,7 +33,7 @@ export function useForm<T extends z.ZodType>(
       for (const issue of parsed.error.issues) {
         errors.value[issue.path.map(String).join('.')] ??= issue.message
       }
-      return
+      return showFirst()
     }
     isSending.value = true
     try {
@@ -38,6 +44,7 @@ export function useForm<T extends z.ZodType>(
     } finally {
       isSending.value = false
     }
+    await showFirst()
   }
   return { errors, message, isSending, submit }
 }
