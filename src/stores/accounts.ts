@@ -15,6 +15,8 @@ export const useAccountsStore = defineStore('accounts', () => {
   /** The session was ended from another device while somebody was at work here. */
   const hasEndedElsewhere = ref(false)
   let loading: Promise<void> | null = null
+  /** One choice after the other, so that the last one made is the one that is kept. */
+  let keeping: Promise<void> = Promise.resolve()
 
   const isSignedIn = computed(() => me.value !== null)
 
@@ -47,8 +49,9 @@ export const useAccountsStore = defineStore('accounts', () => {
     await (everywhere ? api.signOutEverywhere() : api.signOutHere())
     take(null)
   }
+  /** Units and theme are not taken from the answer: they may have been changed again meanwhile. */
   async function change(input: ChangeAccount) {
-    take((await api.changeMe(input)).user)
+    me.value = (await api.changeMe(input)).user
   }
   async function openBench() {
     take((await api.openBench()).user)
@@ -56,8 +59,10 @@ export const useAccountsStore = defineStore('accounts', () => {
   /** What is kept with the account when the line is back, should it be down now. */
   async function keepWithAccount(choice: Pick<ChangeAccount, 'units' | 'theme'>) {
     if (!me.value) return
+    const sent = keeping.then(() => change(choice))
+    keeping = sent.catch(() => undefined)
     try {
-      await change(choice)
+      await sent
     } catch (error) {
       if (asProblem(error).isOffline) {
         addEventListener('online', () => void keepWithAccount(choice), { once: true })

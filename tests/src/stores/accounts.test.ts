@@ -51,7 +51,21 @@ describe('useAccountsStore', () => {
     await accounts.load()
     void accounts.setUnits('metric')
     expect(accounts.units).toBe('metric')
+    await flushPromises()
     expect(api.changeMe).toHaveBeenCalledWith({ units: 'metric' })
+  })
+
+  it('lets the answer to one choice not undo the next', async () => {
+    vi.mocked(api.changeMe).mockImplementation(async (choice) => {
+      await Promise.resolve()
+      return { user: { ...jo, ...choice } }
+    })
+    const accounts = useAccountsStore()
+    await accounts.load()
+    const kept = accounts.setUnits('metric')
+    const keptToo = accounts.setTheme('sun')
+    await Promise.all([kept, keptToo])
+    expect([accounts.units, accounts.theme]).toEqual(['metric', 'sun'])
   })
 
   it('asks no account for a visitor’s theme', async () => {
