@@ -1,7 +1,7 @@
 import { expect as baseExpect, test as base, type Page } from '@playwright/test'
 
 /** No test is about speed; a busy machine may take this long. */
-const patience = { testMs: 240_000, stepMs: 30_000 }
+const patience = { testMs: 300_000, stepMs: 30_000 }
 
 export const expect = baseExpect.configure({ timeout: patience.stepMs })
 
