@@ -26,7 +26,6 @@ const wrongKinds: Record<string, QuestionAnswer> = {
 
 describe('single choice', () => {
   it('shows the drawings, and keeps the written order where the video letters the choices', () => {
-    if (questions.single.kind !== 'single') throw new Error('not a single choice')
     const choices = questions.single.definition.choices.map((choice) => ({
       ...choice,
       drawing: 'furrow-rough-top' as const,
