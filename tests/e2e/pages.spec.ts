@@ -110,22 +110,24 @@ for (const [reader, { who, paths }] of Object.entries(readers)) {
   for (const path of paths) {
     test(`${reader} reads ${path} in both themes and at every width`, async ({
       page,
-      baseURL = '',
+      baseURL,
     }) => {
-      if (who) await signIn(page.context(), baseURL, who)
-      await judge(page, baseURL, path)
+      const base = String(baseURL)
+      if (who) await signIn(page.context(), base, who)
+      await judge(page, base, path)
     })
   }
 }
 
 test('an instructor reads a draft on the bench, from its outline to its stop', async ({
   page,
-  baseURL = '',
+  baseURL,
 }) => {
   test.slow()
-  await signIn(page.context(), baseURL, people.maren)
-  for (const path of await draftPaths(page.context(), baseURL)) {
-    await test.step(path, () => judge(page, baseURL, path))
+  const base = String(baseURL)
+  await signIn(page.context(), base, people.maren)
+  for (const path of await draftPaths(page.context(), base)) {
+    await test.step(path, () => judge(page, base, path))
   }
 })
 
