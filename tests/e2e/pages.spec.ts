@@ -108,10 +108,7 @@ async function judge(page: Page, base: string, path: string) {
 
 for (const [reader, { who, paths }] of Object.entries(readers)) {
   for (const path of paths) {
-    test(`${reader} reads ${path} in both themes and at every width`, async ({
-      page,
-      baseURL,
-    }) => {
+    test(`${reader} reads ${path} in both themes and at every width`, async ({ page, baseURL }) => {
       const base = String(baseURL)
       if (who) await signIn(page.context(), base, who)
       await judge(page, base, path)
