@@ -14,8 +14,8 @@ export default defineConfig({
   outputDir: `${root}/test-results`,
   forbidOnly: true,
   workers: 1,
-  timeout: 60_000,
-  expect: { timeout: 10_000 },
+  timeout: 180_000,
+  expect: { timeout: 20_000 },
   reporter: 'list',
   use: {
     baseURL,
