@@ -33,8 +33,10 @@ async function pause() {
   await vi.advanceTimersByTimeAsync(800)
   await flushPromises()
 }
-const kept = () =>
-  JSON.parse(localStorage.getItem('gf-unsent:course:1') ?? '{"changes":{}}').changes
+function kept(): unknown {
+  const text = localStorage.getItem('gf-unsent:course:1') ?? '{"changes":{}}'
+  return (JSON.parse(text) as { changes: unknown }).changes
+}
 
 beforeEach(() => {
   vi.useFakeTimers()
