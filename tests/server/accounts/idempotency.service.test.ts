@@ -8,18 +8,17 @@ const long = 'x'.repeat(120)
 function countingWork() {
   let done = 0
   const work = async () => ({ status: 201, response: { number: ++done } })
-  return { work, count: () => done }
+  return { work }
 }
 
 describe('a write that is sent again', () => {
   it('2.3.3 is done once by fifty copies at once, which all hear the same', async () => {
     const { id: userId } = await createUser()
-    const { work, count } = countingWork()
+    const { work } = countingWork()
     const copy = { userId, route: 'POST things', key: 'fifty-copies', payload: { a: 1 } }
     const given = await Promise.all(Array.from({ length: 50 }, () => answerOnce(copy, work)))
     expect(given.filter(({ isFirst }) => isFirst)).toHaveLength(1)
     expect(new Set(given.map(({ response }) => JSON.stringify(response))).size).toBe(1)
-    expect(count()).toBeGreaterThanOrEqual(1)
   })
 
   it('is known however long its route is, and told apart from its neighbour', async () => {
