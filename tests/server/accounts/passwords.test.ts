@@ -15,8 +15,9 @@ function watchArgon2() {
       running--
     }
   }
-  vi.spyOn(argon2, 'hash').mockImplementation(((...given: Parameters<typeof hash>) =>
-    watch(() => hash(...given))))
+  vi.spyOn(argon2, 'hash').mockImplementation((...given: Parameters<typeof hash>) =>
+    watch(() => hash(...given)),
+  )
   vi.spyOn(argon2, 'verify').mockImplementation((...given) => watch(() => verify(...given)))
   return () => most
 }
