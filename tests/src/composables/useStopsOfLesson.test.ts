@@ -23,18 +23,18 @@ function playLesson(stops: TapeStop[]) {
   })
   return {
     ...{ lesson, hold, known, positionMs },
-    async playTo(atMs: number) {
+    playTo: async (atMs: number) => {
       isPlaying.value = true
       await nextTick()
       positionMs.value = atMs
       await nextTick()
     },
-    async jumpTo(atMs: number) {
+    jumpTo: async (atMs: number) => {
       jumps.value++
       positionMs.value = atMs
       await nextTick()
     },
-    async end() {
+    end: async () => {
       positionMs.value = durationMs
       isPlaying.value = false
       await nextTick()
