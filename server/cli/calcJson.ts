@@ -57,8 +57,13 @@ export const jsonUnit = ({ quantity }: CalculatorInput | CalculatorOutput): stri
 /** A number in JSON as the calculators hold it, and back: only degrees differ. */
 const fromJson = (value: number, field: CalculatorInput) =>
   field.quantity === 'angle' ? value * RADIANS_PER_DEGREE : value
-const toJson = (value: Value, field: CalculatorOutput) =>
-  field.quantity === 'angle' && typeof value === 'number' ? value / RADIANS_PER_DEGREE : value
+function toJson(value: Value, field: CalculatorOutput): Value {
+  if (Array.isArray(value))
+    return (value as readonly number[]).map((one) => Number(toJson(one, field)))
+  return field.quantity === 'angle' && typeof value === 'number'
+    ? value / RADIANS_PER_DEGREE
+    : value
+}
 
 /** Computes a calculator from a JSON object of inputs. */
 export function computeJson(id: string, json: string): CalcSuccess | CalcFailure {
@@ -113,6 +118,12 @@ export function computeInputs(
   return { id, outputs, steps: metric.steps, cautions }
 }
 
+/** One of a row: a plain number in JSON units gets its unit, so that it is read as any text. */
+const writeJson = (value: unknown, input: CalculatorInput): string =>
+  typeof value === 'number'
+    ? `${String(value)} ${jsonUnit(input).replace(/^1$/, '')}`
+    : String(value)
+
 /** Texts go the way of the browser's fields, plain numbers are in JSON units and meet the same bounds. */
 function readJson(
   calculator: Calculator,
@@ -129,6 +140,8 @@ function readJson(
     if (value === null) continue
     if (typeof value === 'string') texts[name] = value
     else if (typeof value === 'boolean') texts[name] = value ? 'yes' : 'no'
+    else if (Array.isArray(value))
+      texts[name] = value.map((one) => writeJson(one, input)).join('; ')
     else if (typeof value !== 'number')
       return failure(name, `${input.label} must be a number or a text with a unit.`)
     else if (input.quantity === 'choice') texts[name] = String(value)

@@ -21,8 +21,8 @@ export type Quantity =
   | 'percent'
   | 'time'
 
-/** One value of an input or output: a number in SI (angles in radians) or a word such as a bag or a verdict. */
-export type Value = number | string | boolean
+/** One value of an input or output: a number in SI (angles in radians), a row of them, or a word such as a bag or a verdict. */
+export type Value = number | string | boolean | readonly number[]
 export type Values = Record<string, Value | undefined>
 
 interface InputBase {
@@ -42,6 +42,8 @@ export interface QuantityInput extends InputBase {
   quantity: Quantity
   /** The unit a bare number takes and the field shows; default the site unit of the quantity (mm, in). */
   unit?: Record<UnitSystem, string>
+  /** A row of numbers, written with semicolons between them; each keeps the bounds. */
+  isList?: boolean
   min: number
   max: number
 }
@@ -62,6 +64,8 @@ export interface CalculatorOutput {
   scale?: 'site' | 'run'
   /** The unit it is shown in and a bare answer takes, where `scale` does not say it (L and qt for water). */
   unit?: Record<UnitSystem, string>
+  /** A row of numbers, such as the marks along a board; it is shown, never asked for. */
+  isList?: boolean
 }
 
 /** One line of the worked solution. */
@@ -110,6 +114,8 @@ export interface Calculator {
   title: string
   /** One plain sentence: the question it answers on site. */
   question: string
+  /** Why it matters on site, in plain words; at most five lines of a phone, 320 characters. */
+  help: string
   inputs: CalculatorInput[]
   outputs: CalculatorOutput[]
   /**

@@ -57,6 +57,7 @@ export const diagonals: Calculator = {
   version: 1,
   title: 'Both diagonals',
   question: 'Is it square, and which end moves?',
+  help: 'When opposite sides are equal and both diagonals read the same, all four corners are square. The difference tells at once how far to push, and which way. Check it before the pour: afterwards it is concrete.',
   inputs: [
     {
       name: 'length',

@@ -21,6 +21,9 @@ function showValue(field: Field, value: Value | undefined, system: UnitSystem): 
   if (field.quantity === 'choice') {
     return field.choices?.find((choice) => choice.value === value)?.label ?? String(value)
   }
+  if (Array.isArray(value)) {
+    return (value as readonly number[]).map((one) => showValue(field, one, system)).join('; ')
+  }
   if (typeof value !== 'number') return String(value)
   const scale = 'scale' in field ? field.scale : undefined
   const unit = 'unit' in field ? field.unit?.[system] : undefined
@@ -43,6 +46,13 @@ export const showInput = (
   system: UnitSystem,
 ): string => (input.quantity === 'choice' ? String(value ?? '') : showValue(input, value, system))
 
+/** The parts of a row of numbers as it is typed: `0; 1.2 m; 2.4 m`; a semicolon at its end is forgiven. */
+export const splitList = (text: string): string[] =>
+  text
+    .replace(/;\s*$/, '')
+    .split(';')
+    .map((part) => part.trim())
+
 /**
  * What a person typed in one system as it reads in the other: 300 mm as 11-13/16".
  * Text that cannot be read, or is a choice, stays as it is.
@@ -54,6 +64,11 @@ export function convertText(
   to: UnitSystem,
 ): string {
   if (from === to || input.quantity === 'choice') return text
+  if (input.isList && text.includes(';')) {
+    return splitList(text)
+      .map((part) => convertText(input, part, from, to))
+      .join('; ')
+  }
   const read = parseQuantity(text, input.quantity, {
     system: from,
     defaultUnit: fieldUnit(input, from),

@@ -32,8 +32,10 @@ function compute(values: Values): Values {
   }
 }
 
-const water = (name: string, label: string, help: string) =>
-  ({ name, label, help, quantity: 'volume', unit: waterUnit, min: 0, max: 0.02 }) as const
+/** The least a bag can ask for; what was added may be nothing yet. */
+const LEAST_OF_A_BAG = 0.0005
+const water = (name: string, label: string, help: string, min = LEAST_OF_A_BAG) =>
+  ({ name, label, help, quantity: 'volume', unit: waterUnit, min, max: 0.02 }) as const
 
 /**
  * Too stiff, right or too wet: water a bag against what the bag takes, and the slump where it was measured.
@@ -44,6 +46,7 @@ export const mix: Calculator = {
   version: 1,
   title: 'Mix: stiff, right or wet',
   question: 'Is it too stiff, right or too wet?',
+  help: 'Water makes a mix easy to work and the concrete weak. A splash too much in every bag costs strength, and the top dusts and cracks. Measure the water, look at how the heap slumps, and stop at what the bag says.',
   inputs: [
     {
       name: 'bag',
@@ -53,7 +56,12 @@ export const mix: Calculator = {
       choices: bagChoices,
     },
     {
-      ...water('waterAdded', 'Water added to a bag', 'All of it, with what went in to loosen it.'),
+      ...water(
+        'waterAdded',
+        'Water added to a bag',
+        'All of it, with what went in to loosen it.',
+        0,
+      ),
       initial: { metric: '2.8', imperial: '3.5' },
     },
     {

@@ -70,6 +70,7 @@ export const pitch: Calculator = {
   version: 1,
   title: 'Pitch: one slope, said in every way',
   question: 'What is this slope in degrees, per cent and rise in 12?',
+  help: 'Roofing makers say the least pitch in degrees, carpenters say it in 12, builders of paths in per cent. Mixing them up gives a roof that leaks. This turns one into the others and tells how long the slope is for each step along.',
   inputs: [
     {
       name: 'risePer12',

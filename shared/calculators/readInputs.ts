@@ -1,12 +1,17 @@
-import type { Calculator, CalculatorInput, Value, Values } from './calculator'
+import type { Calculator, CalculatorInput, QuantityInput, Value, Values } from './calculator'
 import type { UnitSystem } from '../contracts/exercises'
-import { fieldUnit, showInput } from './fields'
+import { fieldUnit, showInput, splitList } from './fields'
 import { parseQuantity } from '../units/parse'
 
 /** One sentence for each input that cannot be used, under its name. */
 export type InputErrors = Record<string, string>
 
-type ReadValue = { ok: true; value: Value | undefined } | { ok: false; message: string }
+type Refused = { ok: false; message: string }
+type ReadValue = { ok: true; value: Value | undefined } | Refused
+type ReadNumber = { ok: true; value: number } | Refused
+
+/** More posts or marks than any garden job has. */
+const MOST_IN_LIST = 60
 
 /**
  * Reads what a person typed into a calculator's fields; a missing text of an assumed input or a choice takes its initial value.
@@ -41,12 +46,27 @@ function readInput(
     return { ok: false, message: `${input.label} is ${state}. Give ${permitted(input, system)}.` }
   }
   if (input.quantity === 'choice') return readChoice(input, text, system)
+  return input.isList ? readList(input, text, system) : readQuantity(input, text, system)
+}
+
+function readQuantity(input: QuantityInput, text: string, system: UnitSystem): ReadNumber {
   const read = parseQuantity(text, input.quantity, {
     system,
     defaultUnit: fieldUnit(input, system),
   })
   if (!read.ok) return { ok: false, message: `${input.label}: ${read.message}` }
   return checkBounds(input, read.value, system)
+}
+
+function readList(input: QuantityInput, text: string, system: UnitSystem): ReadValue {
+  const parts = splitList(text)
+  if (parts.length > MOST_IN_LIST) {
+    const message = `${input.label}: ${String(parts.length)} numbers are too many. Give up to ${String(MOST_IN_LIST)}, with semicolons between them.`
+    return { ok: false, message }
+  }
+  const read = parts.map((part) => readQuantity(input, part, system))
+  const refused = read.find((one) => !one.ok)
+  return refused ?? { ok: true, value: read.flatMap((one) => (one.ok ? [one.value] : [])) }
 }
 
 function readChoice(
@@ -69,7 +89,7 @@ function readChoice(
 const plain = (text: string) => text.toLowerCase().replace(/\s+/g, '')
 
 /** A value in SI against the bounds of its input; binary dust at a bound is forgiven. */
-export function checkBounds(input: CalculatorInput, value: number, system: UnitSystem): ReadValue {
+export function checkBounds(input: CalculatorInput, value: number, system: UnitSystem): ReadNumber {
   if (input.quantity === 'choice') return { ok: true, value }
   const dust = 1e-9 * Math.max(1, Math.abs(input.max))
   if (value >= input.min - dust && value <= input.max + dust) return { ok: true, value }

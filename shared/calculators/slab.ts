@@ -49,6 +49,7 @@ export const slab: Calculator = {
   version: 1,
   title: 'Slab: concrete and bags',
   question: 'How much concrete, and how many bags, does this pad take?',
+  help: 'Short by one bag, you stop in the middle of a pour and get a cold joint, the first place to crack. Far too many, and damp bags set hard in the shed. Work the volume out from the inside of the form, add a little for a base that is never flat, and always round bags up.',
   inputs: [
     {
       name: 'length',

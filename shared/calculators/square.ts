@@ -30,6 +30,7 @@ export const square: Calculator = {
   version: 1,
   title: 'Straight across a corner (3-4-5)',
   question: 'What must the tape read across the corner?',
+  help: 'A form that is out of square is found again at every board, at the roof and at the door. Three, four and five units make a true corner with nothing but a tape. The bigger the triangle, the less a small error on the tape counts.',
   inputs: [
     {
       name: 'sideA',

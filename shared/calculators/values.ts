@@ -14,6 +14,13 @@ export function numberOf(values: Values, name: string): number {
 export const optionalNumber = (values: Values, name: string): number | undefined =>
   values[name] === undefined ? undefined : numberOf(values, name)
 
+/** The row of numbers under this name. */
+export function listOf(values: Values, name: string): readonly number[] {
+  const value = values[name]
+  if (!Array.isArray(value)) throw new Error(`“${name}” is not a row of numbers`)
+  return value as readonly number[]
+}
+
 /** The word under this name. */
 export function wordOf(values: Values, name: string): string {
   const value = values[name]

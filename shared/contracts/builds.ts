@@ -60,7 +60,10 @@ export const fieldBookEntrySchema = z.object({
   calculator: z.string(),
   calculatorVersion: z.number(),
   inputs: z.record(z.string(), z.string()),
-  outputs: z.record(z.string(), z.union([z.number(), z.string(), z.boolean()])),
+  outputs: z.record(
+    z.string(),
+    z.union([z.number(), z.string(), z.boolean(), z.array(z.number())]),
+  ),
   createdAt: z.iso.datetime(),
 })
 export type FieldBookEntry = z.infer<typeof fieldBookEntrySchema>

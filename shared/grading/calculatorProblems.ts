@@ -38,8 +38,12 @@ export function findCalculatorProblems({ definition }: CalculatorExercise): Exer
 function findNameProblems(calculator: Calculator, definition: CalculatorDefinition) {
   const problems: ExerciseProblem[] = []
   const { asked, slips, inputs } = definition
-  if (!calculator.outputs.some(({ name }) => name === asked)) {
+  const output = calculator.outputs.find(({ name }) => name === asked)
+  if (!output) {
     problems.push(block('definition.asked', `${calculator.title} has no answer “${asked}”.`))
+  } else if (output.isList) {
+    const message = `${output.label} is a row of numbers and cannot be asked for.`
+    problems.push(block('definition.asked', message))
   }
   for (const name of Object.keys(inputs)) {
     if (calculator.inputs.some((input) => input.name === name)) continue

@@ -1,6 +1,7 @@
 import AxeBuilder from '@axe-core/playwright'
 import type { Page } from '@playwright/test'
 import { pressOn, tabTo, typeInto } from './support/keyboard'
+import { beginLesson } from './support/lesson'
 import { signUp } from './support/people'
 import { expect, test } from './support/watched'
 
@@ -45,11 +46,8 @@ test('a learner enrols, is stopped, is told the slip, answers right and sees the
   await expect(page.getByRole('img', { name: /Roof: in pencil/ })).toBeVisible()
 
   await page.goto(lessonPath)
-  const play = page.getByRole('button', { name: 'Play the lesson' })
-  await expect(play).toBeDisabled()
-  for (const item of await page.getByRole('checkbox').all()) await item.check()
-  await play.click()
-  await expect(page.getByRole('slider', { name: 'Where the video is' })).toBeVisible()
+  await expect(page.getByRole('button', { name: 'Play the lesson' })).toBeDisabled()
+  await beginLesson(page)
 
   await playFast(page)
   await expect(page.getByText('The video waits at stop 1')).toBeVisible()
@@ -87,8 +85,7 @@ test('what a learner solved on one device is solved on the other', async ({ page
   await page.getByRole('button', { name: 'Start this build' }).click()
   await page.getByRole('heading', { name: 'Next thing to do' }).waitFor()
   await page.goto(lessonPath)
-  for (const item of await page.getByRole('checkbox').all()) await item.check()
-  await page.getByRole('button', { name: 'Play the lesson' }).click()
+  await beginLesson(page)
   await page.getByRole('button', { name: /^Stop 1, Pitch in degrees/ }).click()
   await answer(page, degreesOfRoof.toFixed(1))
   await expect(workbench(page).getByText('is right.')).toBeVisible()
@@ -155,9 +152,7 @@ for (const [width, height] of [
   test(`a visitor’s sample lesson holds at ${width} px in both themes`, async ({ page }) => {
     await page.setViewportSize({ width, height })
     await page.goto(`${sheetPath}/lessons/squaring-the-form`)
-    for (const item of await page.getByRole('checkbox').all()) await item.check()
-    await page.getByRole('button', { name: 'Play the lesson' }).click()
-    await page.getByRole('slider', { name: 'Where the video is' }).waitFor()
+    await beginLesson(page)
     for (const theme of ['paper', 'sun']) {
       await page.evaluate((name) => (document.documentElement.dataset['theme'] = name), theme)
       expect((await new AxeBuilder({ page }).analyze()).violations).toEqual([])

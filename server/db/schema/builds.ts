@@ -27,7 +27,9 @@ export const fieldBookEntries = mysqlTable(
     calculator: varchar('calculator', { length: 40 }).notNull(),
     calculatorVersion: int('calculator_version', { unsigned: true }).notNull(),
     inputs: json('inputs').$type<Record<string, string>>().notNull(),
-    outputs: json('outputs').$type<Record<string, number | string | boolean>>().notNull(),
+    outputs: json('outputs')
+      .$type<Record<string, number | string | boolean | readonly number[]>>()
+      .notNull(),
     createdAt: createdAt(),
   },
   (t) => [index('field_book_entries_build').on(t.buildId, t.id)],

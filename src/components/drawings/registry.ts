@@ -1,4 +1,5 @@
 import { defineAsyncComponent, h, type Component } from 'vue'
+import type { DrawCalculatorSheet } from './calculatorSheet'
 
 /** Holds the drawing's room while its code is on the way. */
 const DrawingWaits = () => h('div', { style: 'min-height: 236px' })
@@ -7,13 +8,13 @@ function load(loader: () => Promise<{ default: Component }>): Component {
   return defineAsyncComponent({ loader, loadingComponent: DrawingWaits, delay: 0 })
 }
 
-/** The drawing of each calculator by the calculator's id; each is fetched when it is first shown. */
-export const CALCULATOR_DRAWINGS: Readonly<Record<string, Component>> = {
-  slab: load(() => import('./SlabDrawing.vue')),
-  mix: load(() => import('./MixDrawing.vue')),
-  square: load(() => import('./SquareDrawing.vue')),
-  diagonals: load(() => import('./DiagonalsDrawing.vue')),
-  pitch: load(() => import('./PitchDrawing.vue')),
+/** How each calculator is drawn, by the calculator's id; each is fetched when it is first shown. */
+export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalculatorSheet>>> = {
+  slab: async () => (await import('./slabSheet')).drawSlabSheet,
+  mix: async () => (await import('./mixSheet')).drawMixSheet,
+  square: async () => (await import('./squareSheet')).drawSquareSheet,
+  diagonals: async () => (await import('./diagonalsSheet')).drawDiagonalsSheet,
+  pitch: async () => (await import('./pitchSheet')).drawPitchSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -1,15 +1,16 @@
 import { mount } from '@vue/test-utils'
 import { describe, expect, it } from 'vitest'
 import { findCalculator, runCalculator } from '../../../../shared/calculators'
-import SlabDrawing from '../../../../src/components/drawings/SlabDrawing.vue'
-import SquareDrawing from '../../../../src/components/drawings/SquareDrawing.vue'
+import CalculatorSheetDrawing from '../../../../src/components/drawings/CalculatorSheetDrawing.vue'
+import { drawSlabSheet } from '../../../../src/components/drawings/slabSheet'
+import { drawSquareSheet } from '../../../../src/components/drawings/squareSheet'
 
 const pad = { length: 2.6, width: 1.1, thickness: 0.1 }
 
 describe('CalculatorSheetDrawing', () => {
   it('draws again when a number or the system changes', async () => {
-    const wrapper = mount(SlabDrawing, {
-      props: { values: pad, outputs: null, system: 'metric', size: 'narrow' },
+    const wrapper = mount(CalculatorSheetDrawing, {
+      props: { draw: drawSlabSheet, values: pad, outputs: null, system: 'metric', size: 'narrow' },
     })
     expect(wrapper.text()).toContain('2600')
     await wrapper.setProps({ values: { ...pad, length: 3 } })
@@ -19,8 +20,8 @@ describe('CalculatorSheetDrawing', () => {
   })
 
   it('keeps the last drawing that fitted, and says so', async () => {
-    const wrapper = mount(SlabDrawing, {
-      props: { values: pad, outputs: null, system: 'metric', size: 'wide' },
+    const wrapper = mount(CalculatorSheetDrawing, {
+      props: { draw: drawSlabSheet, values: pad, outputs: null, system: 'metric', size: 'wide' },
     })
     await wrapper.setProps({ values: { ...pad, width: undefined } })
     expect(wrapper.text()).toContain('1100')
@@ -28,7 +29,9 @@ describe('CalculatorSheetDrawing', () => {
   })
 
   it('says that it waits while there are no numbers yet', () => {
-    const wrapper = mount(SlabDrawing, { props: { values: {}, outputs: null, system: 'metric' } })
+    const wrapper = mount(CalculatorSheetDrawing, {
+      props: { draw: drawSlabSheet, values: {}, outputs: null, system: 'metric' },
+    })
     expect(wrapper.find('svg').exists()).toBe(false)
     expect(wrapper.text()).toContain('Drawn once the numbers are in.')
   })
@@ -38,7 +41,9 @@ describe('CalculatorSheetDrawing', () => {
     const run = square && runCalculator(square, square.example.inputs, 'metric')
     if (!run?.ok) throw new Error('the example of the 3-4-5 does not run')
     const { values, outputs } = run
-    const wrapper = mount(SquareDrawing, { props: { values, outputs, system: 'metric' } })
+    const wrapper = mount(CalculatorSheetDrawing, {
+      props: { draw: drawSquareSheet, values, outputs, system: 'metric' },
+    })
     expect(wrapper.get('svg').attributes('aria-label')).toContain('the tape reads 1500')
   })
 })

@@ -3,14 +3,14 @@ import { calculators } from '../../../../shared/calculators'
 import { drawCalculatorPicture } from '../../../../src/components/drawings/calculatorPictures'
 import { drawPostFoot } from '../../../../src/components/drawings/postFoot'
 import { createRoundFigure } from '../../../../src/components/drawings/figures'
-import { CALCULATOR_DRAWINGS } from '../../../../src/components/drawings/registry'
+import { CALCULATOR_SHEETS } from '../../../../src/components/drawings/registry'
 import { findFaults } from './labelFaults'
 
 const systems = ['metric', 'imperial'] as const
 
 describe('small pictures', () => {
   it.each(calculators.map(({ id }) => id))('shows what %s is asked for, in both systems', (id) => {
-    expect(CALCULATOR_DRAWINGS).toHaveProperty(id)
+    expect(CALCULATOR_SHEETS).toHaveProperty(id)
     for (const system of systems) {
       const drawing = drawCalculatorPicture(id, system)
       expect(drawing && findFaults(drawing)).toEqual([])
