@@ -62,7 +62,7 @@ export const fieldBookEntrySchema = z.object({
   inputs: z.record(z.string(), z.string()),
   outputs: z.record(
     z.string(),
-    z.union([z.number(), z.string(), z.boolean(), z.array(z.number())]),
+    z.union([z.number(), z.string(), z.boolean(), z.array(z.number()).readonly()]),
   ),
   createdAt: z.iso.datetime(),
 })
