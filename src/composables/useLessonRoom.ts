@@ -69,11 +69,13 @@ export function useLessonRoom(room: LessonRoom, frame: Ref<HTMLElement | null>) 
   )
   const settleAt = computed(() => cues.value.map((cue) => cue.endMs))
 
-  /** The workbench takes the focus, unless somebody is writing. */
+  /** The workbench takes the focus, unless somebody is writing; opened from below, it is scrolled to. */
   async function focusWorkbench() {
     await nextTick()
     if (document.activeElement?.matches('input, textarea')) return
-    document.querySelector<HTMLElement>('#workbench')?.focus({ preventScroll: true })
+    const workbench = document.querySelector<HTMLElement>('#workbench')
+    workbench?.focus({ preventScroll: true })
+    if ((workbench?.getBoundingClientRect().top ?? 0) < 0) workbench?.scrollIntoView()
   }
   watch(
     () => open.value?.key,
