@@ -31,10 +31,10 @@ router.beforeEach(async (to) => {
 router.beforeResolve(() => useAccountsStore().load())
 
 router.afterEach(async (to, from, failure) => {
-  if (failure) return
+  const isFirst = from.matched.length === 0
+  if (failure || (!isFirst && to.path === from.path)) return
   document.title = to.meta.title ? `${to.meta.title} · Good Footing` : 'Good Footing'
-  if (from.matched.length > 0 && to.path !== from.path) {
-    await nextTick()
-    document.querySelector<HTMLElement>('#main')?.focus({ preventScroll: true })
-  }
+  if (isFirst) return
+  await nextTick()
+  document.querySelector<HTMLElement>('#main')?.focus({ preventScroll: true })
 })

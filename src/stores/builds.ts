@@ -1,6 +1,6 @@
 import { defineStore } from 'pinia'
 import { ref, shallowRef } from 'vue'
-import type { Build, BuildRow } from '../../shared/contracts/builds'
+import type { Build, BuildRow, PutInFieldBook } from '../../shared/contracts/builds'
 import * as api from '../api/builds'
 
 /** The signed-in person's builds. */
@@ -24,5 +24,15 @@ export const useBuildsStore = defineStore('builds', () => {
     build.value = await api.fetchBuild(slug)
     return build.value
   }
-  return { rows, nextCursor, build, loadRows, loadMoreRows, loadBuild }
+  /** One key for one entry, kept until the server has taken it, so that a repeat counts once. */
+  let unsent: { body: string; key: string } | null = null
+
+  /** Puts a number into the field book of one's build. */
+  async function keepEntry(slug: string, entry: PutInFieldBook) {
+    const body = JSON.stringify([slug, entry])
+    if (unsent?.body !== body) unsent = { body, key: crypto.randomUUID() }
+    await api.putInFieldBook(slug, entry, unsent.key)
+    unsent = null
+  }
+  return { rows, nextCursor, build, keepEntry, loadRows, loadMoreRows, loadBuild }
 })

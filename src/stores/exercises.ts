@@ -3,8 +3,8 @@ import { ref, shallowRef } from 'vue'
 import type { Step, Values } from '../../shared/calculators/calculator'
 import type { Answer, StopState, UnitSystem } from '../../shared/contracts/exercises'
 import { fetchStop, sendAttempt } from '../api/exercises'
-import { putInFieldBook } from '../api/builds'
 import { useAccountsStore } from './accounts'
+import { useBuildsStore } from './builds'
 import { useLessonsStore } from './lessons'
 
 /** A calculator as far as it was worked, for the drawing and the steps beside the workbench. */
@@ -21,6 +21,7 @@ export interface WorkedCalculator {
 export const useExercisesStore = defineStore('exercises', () => {
   const accounts = useAccountsStore()
   const lessons = useLessonsStore()
+  const builds = useBuildsStore()
   const state = shallowRef<StopState | null>(null)
   const worked = shallowRef<WorkedCalculator | null>(null)
   const isInFieldBook = ref(false)
@@ -61,7 +62,7 @@ export const useExercisesStore = defineStore('exercises', () => {
       inputs,
       units,
     }
-    await putInFieldBook(lessons.place.slug, entry, crypto.randomUUID())
+    await builds.keepEntry(lessons.place.slug, entry)
     isInFieldBook.value = true
   }
   /** The same exercise in other words, after the person changed their units. */

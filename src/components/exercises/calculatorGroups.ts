@@ -1,6 +1,7 @@
 /** The calculators along the stages of a build. */
 export const calculatorGroups: { title: string; about: string; ids: string[] }[] = [
-  { title: 'Ground', about: 'Setting out', ids: ['square', 'diagonals'] },
+  { title: 'Ground', about: 'Setting out and digging', ids: ['square', 'diagonals', 'fall'] },
   { title: 'Base', about: 'Concrete', ids: ['slab', 'mix'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
+  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets'] },
 ]
