@@ -2,11 +2,12 @@ import type { Calculator } from './calculator'
 import { diagonals } from './diagonals'
 import { mix } from './mix'
 import { pitch } from './pitch'
+import { sheets } from './sheets'
 import { slab } from './slab'
 import { square } from './square'
 
 /** Every calculator there is; a new one is one file and one line here. */
-export const calculators: readonly Calculator[] = [slab, mix, square, diagonals, pitch]
+export const calculators: readonly Calculator[] = [slab, mix, square, diagonals, pitch, sheets]
 
 /** The calculator of this id. */
 export const findCalculator = (id: string): Calculator | undefined =>

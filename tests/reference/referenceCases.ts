@@ -1,4 +1,5 @@
 import concreteVolume from './concrete-volume.json'
+import corrugatedRoofing from './corrugated-roofing.json'
 import drainageFall from './drainage-fall.json'
 import mixConsistency from './mix-consistency.json'
 import pitchRafter from './pitch-rafter.json'
@@ -17,7 +18,14 @@ export interface ReferenceCase {
   note: string
 }
 
-const files = { concreteVolume, drainageFall, mixConsistency, pitchRafter, squaring } as const
+const files = {
+  concreteVolume,
+  corrugatedRoofing,
+  drainageFall,
+  mixConsistency,
+  pitchRafter,
+  squaring,
+} as const
 
 /** Every case whose id matches; a pattern that matches none is an error, so that no table runs empty. */
 export function findCases(file: keyof typeof files, id: RegExp): ReferenceCase[] {

@@ -2,6 +2,7 @@ import { drawDiagonalsPicture, drawPitchPicture, drawSquarePicture } from './set
 import { dimensionColumn, dimensionRow } from './dimensions'
 import { Drawing } from './drawing'
 import { createRoundFigure, type RoundFigure } from './figures'
+import { drawSheetsPicture } from './sheetsSheet'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
 
 /** Draws one small picture; a figure is given round in both systems, in millimetres and in inches. */
@@ -40,6 +41,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   square: drawSquarePicture,
   diagonals: drawDiagonalsPicture,
   pitch: drawPitchPicture,
+  sheets: drawSheetsPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

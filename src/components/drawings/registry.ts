@@ -15,6 +15,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   square: async () => (await import('./squareSheet')).drawSquareSheet,
   diagonals: async () => (await import('./diagonalsSheet')).drawDiagonalsSheet,
   pitch: async () => (await import('./pitchSheet')).drawPitchSheet,
+  sheets: async () => (await import('./sheetsSheet')).drawSheetsSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
