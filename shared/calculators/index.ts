@@ -1,5 +1,6 @@
 import type { Calculator } from './calculator'
 import { diagonals } from './diagonals'
+import { fall } from './fall'
 import { mix } from './mix'
 import { pitch } from './pitch'
 import { sheets } from './sheets'
@@ -7,7 +8,15 @@ import { slab } from './slab'
 import { square } from './square'
 
 /** Every calculator there is; a new one is one file and one line here. */
-export const calculators: readonly Calculator[] = [slab, mix, square, diagonals, pitch, sheets]
+export const calculators: readonly Calculator[] = [
+  slab,
+  mix,
+  square,
+  diagonals,
+  pitch,
+  sheets,
+  fall,
+]
 
 /** The calculator of this id. */
 export const findCalculator = (id: string): Calculator | undefined =>

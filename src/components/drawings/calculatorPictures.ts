@@ -1,3 +1,4 @@
+import { drawFallPicture } from './fallSheet'
 import { drawDiagonalsPicture, drawPitchPicture, drawSquarePicture } from './settingOutPictures'
 import { dimensionColumn, dimensionRow } from './dimensions'
 import { Drawing } from './drawing'
@@ -42,6 +43,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   diagonals: drawDiagonalsPicture,
   pitch: drawPitchPicture,
   sheets: drawSheetsPicture,
+  fall: drawFallPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -16,6 +16,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   diagonals: async () => (await import('./diagonalsSheet')).drawDiagonalsSheet,
   pitch: async () => (await import('./pitchSheet')).drawPitchSheet,
   sheets: async () => (await import('./sheetsSheet')).drawSheetsSheet,
+  fall: async () => (await import('./fallSheet')).drawFallSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
