@@ -170,3 +170,46 @@ for (const [width, height] of [
     expect(overflow).toBeLessThanOrEqual(0)
   })
 }
+
+test('a calculator opens with the numbers of its link, works without a line, and is kept', async ({
+  page,
+  context,
+}) => {
+  await signUp(page, 'Ruben Oakes')
+  await page.goto(sheetPath)
+  await page.getByRole('button', { name: 'Start this build' }).click()
+  await page.getByRole('heading', { name: 'Next thing to do' }).waitFor()
+
+  await page.goto('/calculators/square?units=imperial&sideA=10 ft&sideB=8 ft')
+  const across = page.getByRole('definition').first()
+  await expect(page.getByLabel('Long side', { exact: true })).toHaveValue('3048')
+  // 8 ft holds three units of 32 in, 10 ft four of 30: the unit is 30 in or 762 mm, down to 750.
+  await expect(across).toHaveText(/^3750.mm$/)
+  await expect(page.getByRole('img', { name: /the tape reads 3750/ })).toBeVisible()
+
+  await context.setOffline(true)
+  await page.getByLabel('Short side', { exact: true }).fill('1.5 m')
+  await expect(across).toHaveText(/^2500.mm$/)
+  await page.getByLabel('Which number to slide').selectOption('Short side')
+  const slider = page.getByRole('slider', { name: 'Short side' })
+  await slider.press('End')
+  await expect(page.getByLabel('Short side', { exact: true })).toHaveValue('3000')
+  await expect(across).toHaveText(/^3750.mm$/)
+  await context.setOffline(false)
+
+  const download = page.waitForEvent('download')
+  await page.getByRole('button', { name: 'Save the drawing' }).click()
+  expect((await download).suggestedFilename()).toBe('square.svg')
+  await expect(page).toHaveURL(/sideB=3000/)
+  await page.getByRole('button', { name: 'Put in my field book' }).click()
+  await expect(page.getByRole('button', { name: 'It is in your field book' })).toBeDisabled()
+  const kept = await page.request.get(`/api/courses/${slug}/field-book-entries`)
+  expect(await kept.json()).toMatchObject({
+    items: [
+      {
+        ...{ calculator: 'square', calculatorVersion: 1, lessonKey: null, stopKey: null },
+        ...{ inputs: { sideA: '3048', sideB: '3000', unit: '' }, outputs: { diagonal: 3.75 } },
+      },
+    ],
+  })
+})
