@@ -1,4 +1,5 @@
 import type { Calculator } from './calculator'
+import { corner } from './corner'
 import { diagonals } from './diagonals'
 import { fall } from './fall'
 import { mix } from './mix'
@@ -16,6 +17,7 @@ export const calculators: readonly Calculator[] = [
   pitch,
   sheets,
   fall,
+  corner,
 ]
 
 /** The calculator of this id. */

@@ -1,3 +1,4 @@
+import { drawCornerPicture } from './cornerPicture'
 import { drawFallPicture } from './fallSheet'
 import { drawDiagonalsPicture, drawPitchPicture, drawSquarePicture } from './settingOutPictures'
 import { dimensionColumn, dimensionRow } from './dimensions'
@@ -44,6 +45,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   pitch: drawPitchPicture,
   sheets: drawSheetsPicture,
   fall: drawFallPicture,
+  corner: drawCornerPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

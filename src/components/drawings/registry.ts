@@ -17,6 +17,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   pitch: async () => (await import('./pitchSheet')).drawPitchSheet,
   sheets: async () => (await import('./sheetsSheet')).drawSheetsSheet,
   fall: async () => (await import('./fallSheet')).drawFallSheet,
+  corner: async () => (await import('./cornerSheet')).drawCornerSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

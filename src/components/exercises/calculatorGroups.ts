@@ -1,6 +1,10 @@
 /** The calculators along the stages of a build. */
 export const calculatorGroups: { title: string; about: string; ids: string[] }[] = [
-  { title: 'Ground', about: 'Setting out and digging', ids: ['square', 'diagonals', 'fall'] },
+  {
+    title: 'Ground',
+    about: 'Setting out and digging',
+    ids: ['square', 'diagonals', 'fall', 'corner'],
+  },
   { title: 'Base', about: 'Concrete', ids: ['slab', 'mix'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets'] },
