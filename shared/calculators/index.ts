@@ -6,6 +6,7 @@ import { mix } from './mix'
 import { pitch } from './pitch'
 import { sheets } from './sheets'
 import { slab } from './slab'
+import { snow } from './snow'
 import { square } from './square'
 
 /** Every calculator there is; a new one is one file and one line here. */
@@ -18,6 +19,7 @@ export const calculators: readonly Calculator[] = [
   sheets,
   fall,
   corner,
+  snow,
 ]
 
 /** The calculator of this id. */

@@ -3,6 +3,7 @@ import corrugatedRoofing from './corrugated-roofing.json'
 import drainageFall from './drainage-fall.json'
 import mixConsistency from './mix-consistency.json'
 import pitchRafter from './pitch-rafter.json'
+import snowLoad from './snow-load.json'
 import squaring from './squaring.json'
 
 /** One check value from outside the project, in the words and units of its source. */
@@ -24,6 +25,7 @@ const files = {
   drainageFall,
   mixConsistency,
   pitchRafter,
+  snowLoad,
   squaring,
 } as const
 

@@ -5,6 +5,7 @@ import { dimensionColumn, dimensionRow } from './dimensions'
 import { Drawing } from './drawing'
 import { createRoundFigure, type RoundFigure } from './figures'
 import { drawSheetsPicture } from './sheetsSheet'
+import { drawSnowPicture } from './snowSheet'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
 
 /** Draws one small picture; a figure is given round in both systems, in millimetres and in inches. */
@@ -46,6 +47,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   sheets: drawSheetsPicture,
   fall: drawFallPicture,
   corner: drawCornerPicture,
+  snow: drawSnowPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -18,6 +18,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   sheets: async () => (await import('./sheetsSheet')).drawSheetsSheet,
   fall: async () => (await import('./fallSheet')).drawFallSheet,
   corner: async () => (await import('./cornerSheet')).drawCornerSheet,
+  snow: async () => (await import('./snowSheet')).drawSnowSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -7,5 +7,5 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   },
   { title: 'Base', about: 'Concrete', ids: ['slab', 'mix'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
-  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets'] },
+  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow'] },
 ]
