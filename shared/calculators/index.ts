@@ -2,6 +2,7 @@ import type { Calculator } from './calculator'
 import { corner } from './corner'
 import { diagonals } from './diagonals'
 import { fall } from './fall'
+import { joints } from './joints'
 import { mix } from './mix'
 import { pitch } from './pitch'
 import { sheets } from './sheets'
@@ -20,6 +21,7 @@ export const calculators: readonly Calculator[] = [
   fall,
   corner,
   snow,
+  joints,
 ]
 
 /** The calculator of this id. */

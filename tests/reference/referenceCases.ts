@@ -1,3 +1,4 @@
+import controlJoints from './control-joints.json'
 import concreteVolume from './concrete-volume.json'
 import corrugatedRoofing from './corrugated-roofing.json'
 import drainageFall from './drainage-fall.json'
@@ -27,6 +28,7 @@ const files = {
   pitchRafter,
   snowLoad,
   squaring,
+  controlJoints,
 } as const
 
 /** Every case whose id matches; a pattern that matches none is an error, so that no table runs empty. */

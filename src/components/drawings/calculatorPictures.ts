@@ -1,3 +1,4 @@
+import { drawJointsPicture } from './jointsSheet'
 import { drawCornerPicture } from './cornerPicture'
 import { drawFallPicture } from './fallSheet'
 import { drawDiagonalsPicture, drawPitchPicture, drawSquarePicture } from './settingOutPictures'
@@ -48,6 +49,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   fall: drawFallPicture,
   corner: drawCornerPicture,
   snow: drawSnowPicture,
+  joints: drawJointsPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -19,6 +19,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   fall: async () => (await import('./fallSheet')).drawFallSheet,
   corner: async () => (await import('./cornerSheet')).drawCornerSheet,
   snow: async () => (await import('./snowSheet')).drawSnowSheet,
+  joints: async () => (await import('./jointsSheet')).drawJointsSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

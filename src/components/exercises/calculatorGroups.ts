@@ -5,7 +5,7 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
     about: 'Setting out and digging',
     ids: ['square', 'diagonals', 'fall', 'corner'],
   },
-  { title: 'Base', about: 'Concrete', ids: ['slab', 'mix'] },
+  { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow'] },
 ]
