@@ -9,6 +9,7 @@ import { sheets } from './sheets'
 import { slab } from './slab'
 import { snow } from './snow'
 import { square } from './square'
+import { taper } from './taper'
 
 /** Every calculator there is; a new one is one file and one line here. */
 export const calculators: readonly Calculator[] = [
@@ -22,6 +23,7 @@ export const calculators: readonly Calculator[] = [
   corner,
   snow,
   joints,
+  taper,
 ]
 
 /** The calculator of this id. */

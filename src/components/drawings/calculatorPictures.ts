@@ -1,3 +1,4 @@
+import { drawTaperPicture } from './taperPicture'
 import { drawJointsPicture } from './jointsSheet'
 import { drawCornerPicture } from './cornerPicture'
 import { drawFallPicture } from './fallSheet'
@@ -50,6 +51,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   corner: drawCornerPicture,
   snow: drawSnowPicture,
   joints: drawJointsPicture,
+  taper: drawTaperPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -20,6 +20,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   corner: async () => (await import('./cornerSheet')).drawCornerSheet,
   snow: async () => (await import('./snowSheet')).drawSnowSheet,
   joints: async () => (await import('./jointsSheet')).drawJointsSheet,
+  taper: async () => (await import('./taperSheet')).drawTaperSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
