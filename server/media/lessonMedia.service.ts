@@ -67,5 +67,6 @@ export const describeBenchVideo = (video: VideoRow | null): BenchLesson['video']
     bytes: video.bytes,
     durationMs: video.durationMs,
     src: video.state === 'ready' ? videoPath(video.id) : null,
+    contentType: video.contentType,
     posterUrl: video.posterKey ? posterPath(video.id) : null,
   }

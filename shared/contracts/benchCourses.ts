@@ -196,6 +196,7 @@ export const benchLessonSchema = z.object({
       bytes: z.number(),
       durationMs: z.number().nullable(),
       src: z.string().nullable(),
+      contentType: z.string(),
       posterUrl: z.string().nullable(),
     })
     .nullable(),

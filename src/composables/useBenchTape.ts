@@ -10,7 +10,7 @@ function toVideo({ video, captions }: BenchLesson): Video | null {
   return {
     id: video.id,
     src: video.src,
-    contentType: 'video/mp4',
+    contentType: video.contentType,
     posterUrl: video.posterUrl,
     durationMs: video.durationMs,
     captions: captions.map(({ id, language, label, isOriginal, version }) => ({
