@@ -3,6 +3,7 @@ import { corner } from './corner'
 import { diagonals } from './diagonals'
 import { fall } from './fall'
 import { joints } from './joints'
+import { lid } from './lid'
 import { mix } from './mix'
 import { pitch } from './pitch'
 import { sheets } from './sheets'
@@ -24,6 +25,7 @@ export const calculators: readonly Calculator[] = [
   snow,
   joints,
   taper,
+  lid,
 ]
 
 /** The calculator of this id. */

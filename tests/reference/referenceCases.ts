@@ -4,6 +4,7 @@ import corrugatedRoofing from './corrugated-roofing.json'
 import drainageFall from './drainage-fall.json'
 import mixConsistency from './mix-consistency.json'
 import pitchRafter from './pitch-rafter.json'
+import safety from './safety.json'
 import snowLoad from './snow-load.json'
 import squaring from './squaring.json'
 
@@ -22,13 +23,14 @@ export interface ReferenceCase {
 
 const files = {
   concreteVolume,
+  controlJoints,
   corrugatedRoofing,
   drainageFall,
   mixConsistency,
   pitchRafter,
+  safety,
   snowLoad,
   squaring,
-  controlJoints,
 } as const
 
 /** Every case whose id matches; a pattern that matches none is an error, so that no table runs empty. */

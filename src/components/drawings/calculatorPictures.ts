@@ -8,6 +8,7 @@ import { Drawing } from './drawing'
 import { createRoundFigure, type RoundFigure } from './figures'
 import { drawSheetsPicture } from './sheetsSheet'
 import { drawSnowPicture } from './snowSheet'
+import { drawLidPicture } from './lidSheet'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
 
 /** Draws one small picture; a figure is given round in both systems, in millimetres and in inches. */
@@ -52,6 +53,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   snow: drawSnowPicture,
   joints: drawJointsPicture,
   taper: drawTaperPicture,
+  lid: drawLidPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

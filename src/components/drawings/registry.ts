@@ -21,6 +21,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   snow: async () => (await import('./snowSheet')).drawSnowSheet,
   joints: async () => (await import('./jointsSheet')).drawJointsSheet,
   taper: async () => (await import('./taperSheet')).drawTaperSheet,
+  lid: async () => (await import('./lidSheet')).drawLidSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -8,5 +8,5 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
   { title: 'Cladding', about: 'Boards', ids: ['taper'] },
-  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow'] },
+  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid'] },
 ]
