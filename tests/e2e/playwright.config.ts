@@ -13,7 +13,7 @@ export default defineConfig({
   testMatch: '**/*.spec.ts',
   outputDir: `${root}/test-results`,
   forbidOnly: true,
-  workers: 1,
+  workers: 2,
   timeout: 180_000,
   expect: { timeout: 20_000 },
   reporter: 'list',
