@@ -2,6 +2,7 @@ import type { Calculator } from './calculator'
 import { corner } from './corner'
 import { diagonals } from './diagonals'
 import { fall } from './fall'
+import { gravel } from './gravel'
 import { joints } from './joints'
 import { lid } from './lid'
 import { mix } from './mix'
@@ -26,6 +27,7 @@ export const calculators: readonly Calculator[] = [
   joints,
   taper,
   lid,
+  gravel,
 ]
 
 /** The calculator of this id. */

@@ -1,3 +1,4 @@
+import { drawGravelPicture } from './gravelSheet'
 import { drawTaperPicture } from './taperPicture'
 import { drawJointsPicture } from './jointsSheet'
 import { drawCornerPicture } from './cornerPicture'
@@ -54,6 +55,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   joints: drawJointsPicture,
   taper: drawTaperPicture,
   lid: drawLidPicture,
+  gravel: drawGravelPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -22,6 +22,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   joints: async () => (await import('./jointsSheet')).drawJointsSheet,
   taper: async () => (await import('./taperSheet')).drawTaperSheet,
   lid: async () => (await import('./lidSheet')).drawLidSheet,
+  gravel: async () => (await import('./gravelSheet')).drawGravelSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
