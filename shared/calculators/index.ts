@@ -1,4 +1,5 @@
 import type { Calculator } from './calculator'
+import { coating } from './coating'
 import { corner } from './corner'
 import { diagonals } from './diagonals'
 import { fall } from './fall'
@@ -28,6 +29,7 @@ export const calculators: readonly Calculator[] = [
   taper,
   lid,
   gravel,
+  coating,
 ]
 
 /** The calculator of this id. */

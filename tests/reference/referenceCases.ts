@@ -2,6 +2,7 @@ import controlJoints from './control-joints.json'
 import concreteVolume from './concrete-volume.json'
 import corrugatedRoofing from './corrugated-roofing.json'
 import drainageFall from './drainage-fall.json'
+import fastenersPaint from './fasteners-paint.json'
 import mixConsistency from './mix-consistency.json'
 import pitchRafter from './pitch-rafter.json'
 import safety from './safety.json'
@@ -26,6 +27,7 @@ const files = {
   controlJoints,
   corrugatedRoofing,
   drainageFall,
+  fastenersPaint,
   mixConsistency,
   pitchRafter,
   safety,

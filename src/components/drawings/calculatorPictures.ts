@@ -10,6 +10,7 @@ import { createRoundFigure, type RoundFigure } from './figures'
 import { drawSheetsPicture } from './sheetsSheet'
 import { drawSnowPicture } from './snowSheet'
 import { drawLidPicture } from './lidSheet'
+import { drawCoatingPicture } from './coatingSheet'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
 
 /** Draws one small picture; a figure is given round in both systems, in millimetres and in inches. */
@@ -56,6 +57,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   taper: drawTaperPicture,
   lid: drawLidPicture,
   gravel: drawGravelPicture,
+  coating: drawCoatingPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

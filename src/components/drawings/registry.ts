@@ -23,6 +23,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   taper: async () => (await import('./taperSheet')).drawTaperSheet,
   lid: async () => (await import('./lidSheet')).drawLidSheet,
   gravel: async () => (await import('./gravelSheet')).drawGravelSheet,
+  coating: async () => (await import('./coatingSheet')).drawCoatingSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
