@@ -3,7 +3,7 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   {
     title: 'Ground',
     about: 'Setting out and digging',
-    ids: ['square', 'diagonals', 'fall', 'corner'],
+    ids: ['square', 'diagonals', 'fall', 'corner', 'posthole'],
   },
   { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints', 'gravel'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
