@@ -8,6 +8,7 @@ import { joints } from './joints'
 import { lid } from './lid'
 import { mix } from './mix'
 import { pitch } from './pitch'
+import { posthole } from './posthole'
 import { sheets } from './sheets'
 import { slab } from './slab'
 import { snow } from './snow'
@@ -30,6 +31,7 @@ export const calculators: readonly Calculator[] = [
   lid,
   gravel,
   coating,
+  posthole,
 ]
 
 /** The calculator of this id. */

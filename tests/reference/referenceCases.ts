@@ -1,3 +1,4 @@
+import postFooting from './post-footing.json'
 import controlJoints from './control-joints.json'
 import concreteVolume from './concrete-volume.json'
 import corrugatedRoofing from './corrugated-roofing.json'
@@ -33,6 +34,7 @@ const files = {
   safety,
   snowLoad,
   squaring,
+  postFooting,
 } as const
 
 /** Every case whose id matches; a pattern that matches none is an error, so that no table runs empty. */

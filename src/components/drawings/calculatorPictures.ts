@@ -1,3 +1,4 @@
+import { drawPostholePicture } from './postholeSheet'
 import { drawGravelPicture } from './gravelSheet'
 import { drawTaperPicture } from './taperPicture'
 import { drawJointsPicture } from './jointsSheet'
@@ -58,6 +59,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   lid: drawLidPicture,
   gravel: drawGravelPicture,
   coating: drawCoatingPicture,
+  posthole: drawPostholePicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

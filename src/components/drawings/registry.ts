@@ -24,6 +24,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   lid: async () => (await import('./lidSheet')).drawLidSheet,
   gravel: async () => (await import('./gravelSheet')).drawGravelSheet,
   coating: async () => (await import('./coatingSheet')).drawCoatingSheet,
+  posthole: async () => (await import('./postholeSheet')).drawPostholeSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
