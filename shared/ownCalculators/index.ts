@@ -1,0 +1,3 @@
+export { buildOwnCalculator, type BuildableCalculator } from './build'
+export { checkOwnCalculator } from './check'
+export { describeOwnCalculator, type CalculatorFace } from './face'
