@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { learnerOwnSnapshotSchema, ownSnapshotSchema } from './ownCalculators'
 import { stableKeySchema } from './stableKey'
 import { unitSystemSchema } from './unitSystem'
 
@@ -29,7 +30,10 @@ export const toleranceSchema = z.strictObject({
 export type Tolerance = z.infer<typeof toleranceSchema>
 
 export const calculatorDefinitionSchema = z.strictObject({
+  /** Of a built-in one, or `own:` with the key of `own`. */
   calculator: z.string().min(1).max(40),
+  /** The instructor's own calculator as it was when it was attached, so that every attempt keeps its version. */
+  own: ownSnapshotSchema.optional(),
   inputs: z.record(z.string(), exerciseInputSchema),
   asked: z.string().min(1).max(40),
   tolerance: toleranceSchema,
@@ -160,6 +164,8 @@ export const learnerExerciseSchema = z.discriminatedUnion('kind', [
     prompt: z.string(),
     tries: z.number().nullable(),
     calculator: z.string(),
+    /** What an own calculator is worked with here; it holds no examples and no slips. */
+    own: learnerOwnSnapshotSchema.optional(),
     asked: z.string(),
     /** Each input's text; `own` inputs may be changed by the learner. */
     inputs: z.record(z.string(), z.object({ mode: z.enum(['given', 'own']), value: z.string() })),

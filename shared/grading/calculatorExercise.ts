@@ -1,11 +1,5 @@
 import type { Calculator, CalculatorOutput, Slip } from '../calculators/calculator'
-import {
-  convertText,
-  fieldUnit,
-  findCalculator,
-  runCalculator,
-  showOutput,
-} from '../calculators/index'
+import { convertText, fieldUnit, runCalculator, showOutput } from '../calculators/index'
 import type {
   Answer,
   CalculatorDefinition,
@@ -14,6 +8,7 @@ import type {
   Verdict,
 } from '../contracts/exercises'
 import { parseQuantity } from '../units/parse'
+import { calculatorOf } from './calculatorOf'
 import { drawInputs } from './drawInputs'
 import { findSlip, matches } from './slips'
 import { unreadVerdict } from './verdict'
@@ -44,7 +39,7 @@ export function gradeCalculator(
   seed: number,
 ): Verdict {
   const { definition } = exercise
-  const calculator = findCalculator(definition.calculator)
+  const calculator = calculatorOf(definition)
   const output = calculator?.outputs.find(({ name }) => name === definition.asked)
   if (!calculator || !output)
     return unreadVerdict('This stop asks for something that does not exist.', 'answer')
@@ -126,7 +121,7 @@ export function showCalculatorAnswer(
   own: OwnTexts,
   system: UnitSystem,
 ): string {
-  const calculator = findCalculator(definition.calculator)
+  const calculator = calculatorOf(definition)
   const output = calculator?.outputs.find(({ name }) => name === definition.asked)
   if (!calculator || !output) return ''
   const converted = calculator.inputs.flatMap((input) => {

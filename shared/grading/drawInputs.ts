@@ -1,4 +1,4 @@
-import type { Calculator, CalculatorInput } from '../calculators/calculator'
+import type { CalculatorInput } from '../calculators/calculator'
 import { fieldUnit, showInput } from '../calculators/fields'
 import type { CalculatorDefinition, ExerciseInput, UnitSystem } from '../contracts/exercises'
 import { clean } from '../units/number'
@@ -15,7 +15,7 @@ type Ranged = Extract<ExerciseInput, { mode: 'ranged' }>
  */
 export function drawInputs(
   definition: CalculatorDefinition,
-  calculator: Calculator,
+  calculator: { inputs: CalculatorInput[] },
   seed: number,
   system: UnitSystem = 'metric',
 ): Record<string, string> {

@@ -1,5 +1,6 @@
-import { findCalculator } from '../calculators/index'
 import type { Answer, Exercise, LearnerExercise, UnitSystem, Verdict } from '../contracts/exercises'
+import type { OwnCalculatorDefinition, OwnCalculatorSheet } from '../contracts/ownCalculators'
+import { calculatorOf, faceOf } from './calculatorOf'
 import { gradeCalculator, showCalculatorAnswer } from './calculatorExercise'
 import { findCalculatorProblems } from './calculatorProblems'
 import { drawInputs } from './drawInputs'
@@ -9,7 +10,7 @@ import { findQuizProblems, gradeQuiz, showQuizAnswer } from './quizExercise'
 import { unreadVerdict } from './verdict'
 
 export type { ExerciseProblem } from './grader'
-export { drawInputs }
+export { calculatorOf, drawInputs, faceOf }
 
 /**
  * An exercise as one learner sees it: own numbers of their seed, the hints they have earned, no right answer.
@@ -28,8 +29,8 @@ export function toLearnerExercise(
     const shown = questions.map((question) => toLearnerQuestion(question, seed))
     return { kind, prompt, tries, passMark, questions: shown }
   }
-  const { calculator: id, asked, hints, inputs } = exercise.definition
-  const calculator = findCalculator(id)
+  const { calculator: id, own, asked, hints, inputs } = exercise.definition
+  const calculator = faceOf(exercise.definition)
   const texts = calculator ? drawInputs(exercise.definition, calculator, seed, system) : {}
   const given = Object.entries(texts).map(([name, value]) => {
     const mode = inputs[name]?.mode === 'own' ? ('own' as const) : ('given' as const)
@@ -40,11 +41,19 @@ export function toLearnerExercise(
     prompt,
     tries,
     calculator: id,
+    ...(own ? { own: { ...own, definition: withoutAnswers(own.definition) } } : {}),
     asked,
     inputs: Object.fromEntries(given) as Record<string, { mode: 'given' | 'own'; value: string }>,
     hints: solved ? hints : hints.slice(0, triesUsed),
   }
 }
+
+/** Examples would give the answer away, and slips name what nobody did. */
+const withoutAnswers = ({
+  examples: _examples,
+  slips: _slips,
+  ...sheet
+}: OwnCalculatorDefinition): OwnCalculatorSheet => sheet
 
 /**
  * The verdict on an answer; its text never holds the right number. `unread` (with its field) costs no try.
