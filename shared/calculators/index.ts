@@ -3,6 +3,7 @@ import { coating } from './coating'
 import { corner } from './corner'
 import { diagonals } from './diagonals'
 import { fall } from './fall'
+import { fixings } from './fixings'
 import { gravel } from './gravel'
 import { joints } from './joints'
 import { lid } from './lid'
@@ -32,6 +33,7 @@ export const calculators: readonly Calculator[] = [
   gravel,
   coating,
   posthole,
+  fixings,
 ]
 
 /** The calculator of this id. */

@@ -12,6 +12,7 @@ import { drawSheetsPicture } from './sheetsSheet'
 import { drawSnowPicture } from './snowSheet'
 import { drawLidPicture } from './lidSheet'
 import { drawCoatingPicture } from './coatingSheet'
+import { drawFixingsPicture } from './fixingsSheet'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
 
 /** Draws one small picture; a figure is given round in both systems, in millimetres and in inches. */
@@ -60,6 +61,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   gravel: drawGravelPicture,
   coating: drawCoatingPicture,
   posthole: drawPostholePicture,
+  fixings: drawFixingsPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -25,6 +25,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   gravel: async () => (await import('./gravelSheet')).drawGravelSheet,
   coating: async () => (await import('./coatingSheet')).drawCoatingSheet,
   posthole: async () => (await import('./postholeSheet')).drawPostholeSheet,
+  fixings: async () => (await import('./fixingsSheet')).drawFixingsSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -9,5 +9,5 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
   { title: 'Cladding', about: 'Boards', ids: ['taper'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid'] },
-  { title: 'Finish', about: 'Screws and oil', ids: ['coating'] },
+  { title: 'Finish', about: 'Screws and oil', ids: ['coating', 'fixings'] },
 ]
