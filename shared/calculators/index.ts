@@ -10,6 +10,7 @@ import { lid } from './lid'
 import { mix } from './mix'
 import { pitch } from './pitch'
 import { posthole } from './posthole'
+import { rafter } from './rafter'
 import { sheets } from './sheets'
 import { slab } from './slab'
 import { snow } from './snow'
@@ -34,6 +35,7 @@ export const calculators: readonly Calculator[] = [
   coating,
   posthole,
   fixings,
+  rafter,
 ]
 
 /** The calculator of this id. */

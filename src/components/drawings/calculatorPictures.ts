@@ -1,3 +1,4 @@
+import { drawRafterPicture } from './rafterPicture'
 import { drawPostholePicture } from './postholeSheet'
 import { drawGravelPicture } from './gravelSheet'
 import { drawTaperPicture } from './taperPicture'
@@ -62,6 +63,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   coating: drawCoatingPicture,
   posthole: drawPostholePicture,
   fixings: drawFixingsPicture,
+  rafter: drawRafterPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -26,6 +26,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   coating: async () => (await import('./coatingSheet')).drawCoatingSheet,
   posthole: async () => (await import('./postholeSheet')).drawPostholeSheet,
   fixings: async () => (await import('./fixingsSheet')).drawFixingsSheet,
+  rafter: async () => (await import('./rafterSheet')).drawRafterSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -8,6 +8,6 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints', 'gravel'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
   { title: 'Cladding', about: 'Boards', ids: ['taper'] },
-  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid'] },
+  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid', 'rafter'] },
   { title: 'Finish', about: 'Screws and oil', ids: ['coating', 'fixings'] },
 ]
