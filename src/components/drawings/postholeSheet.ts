@@ -97,6 +97,7 @@ function describe({ system }: CalculatorSheetInput, hole: Hole, lines: Line[]): 
   const amounts = lines.map(({ text, chalk }) =>
     chalk ? text.replace('? bags', 'how many bags').replace('?', 'what is asked') : text,
   )
+  const [wide, thick] = hole.post
   return `A post of ${wide.text} by ${thick.text}${unit} in a round hole, ${hole.diameter.text}${unit} across and ${hole.depth.text}${unit} deep, in section and from above. Concrete: ${amounts.join('; ')}.`
 }
 
