@@ -1,7 +1,8 @@
 import type { Step, Values } from './calculator'
 import type { UnitSystem } from '../contracts/exercises'
 import { readLidSnow } from './lidSnow'
-import { GRAVITY, PCF, PSF } from './snowCover'
+import { GRAVITY } from './snowCover'
+import { snowDensityStep } from './snowDensityStep'
 import { numberOf, optionalNumber, stepWriter } from './values'
 
 /** The worked solution of `lid`. */
@@ -63,26 +64,13 @@ function snowSteps(values: Values, outputs: Values, system: UnitSystem): Step[] 
     return [{ ...step, formula: 'depth × width × ground snow load', numbers }]
   }
   const dense = writer.show(snow.density, 'massDensity')
+  const ground = optionalNumber(values, 'groundSnowLoad')
   return [
-    ...densityStep(values, snow.density, system),
+    ...(ground === undefined ? [] : [snowDensityStep(ground, system)]),
     {
       ...step,
       formula: 'depth × width × depth of snow × how dense',
       numbers: `${sides} × ${writer.large(snow.depth)} ${unit} × ${dense}`,
-    },
-  ]
-}
-
-function densityStep(values: Values, density: number, system: UnitSystem): Step[] {
-  const ground = optionalNumber(values, 'groundSnowLoad')
-  if (ground === undefined) return []
-  const writer = stepWriter(system)
-  return [
-    {
-      label: 'How dense the snow is',
-      formula: '0.13 × ground snow load in psf + 14, at most 30 lb/ft³',
-      numbers: `0.13 × ${writer.number(ground / PSF)} + 14 = ${writer.number(density / PCF)} lb/ft³`,
-      result: writer.show(density, 'massDensity'),
     },
   ]
 }

@@ -1,6 +1,8 @@
 import fc from 'fast-check'
 import { evaluate } from 'mathjs'
 import { describe, expect, it } from 'vitest'
+import { runCalculator } from '../../../shared/calculators/index'
+import { lid } from '../../../shared/calculators/lid'
 import { snow } from '../../../shared/calculators/snow'
 import {
   densityHelp,
@@ -66,6 +68,24 @@ describe('density of settled snow against ASCE 7', () => {
       expect(distance(one, height * density)).toBeLessThanOrEqual(allowed(one))
     },
   )
+})
+
+describe('the worked density', () => {
+  it.each([
+    ['25 psf', '0.13 × 25 + 14 = 17.25 lb/ft³'],
+    ['150 psf', '0.13 × 150 + 14 = 33.5, at most 30 lb/ft³'],
+  ])('says what it comes to, and where it stops: %s', (groundSnowLoad, numbers) => {
+    for (const [calculator, texts] of [
+      [snow, area],
+      [
+        lid,
+        { weight: '9 kg', depth: '1 m', handleDistance: '1 m', width: '1 m', snowDepth: '1 m' },
+      ],
+    ] as const) {
+      const run = runCalculator(calculator, { ...texts, groundSnowLoad }, 'imperial')
+      expect(run.ok && run.steps.map((step) => step.numbers)).toContain(numbers)
+    }
+  })
 })
 
 describe('load and weight', () => {
