@@ -13,6 +13,7 @@ import {
   varchar,
 } from 'drizzle-orm/mysql-core'
 import type { Answer, CalculatorDefinition, QuizQuestion, Verdict } from '../../../shared/contracts/exercises'
+import type { OwnCalculatorDefinition } from '../../../shared/contracts/ownCalculators'
 import { users } from './accounts'
 import { createdAt, id, moment, reference, stableKey } from './columns'
 import { courses, lessons } from './courses'
@@ -82,6 +83,42 @@ export const quizQuestions = mysqlTable(
     unique('quiz_questions_key').on(t.exerciseId, t.key),
     unique('quiz_questions_position').on(t.exerciseId, t.position),
   ],
+)
+
+/** An instructor's own calculator: the draft that is written, and which of its versions can be attached. */
+export const ownCalculators = mysqlTable(
+  'own_calculators',
+  {
+    id: id(),
+    courseId: reference('course_id')
+      .notNull()
+      .references(() => courses.id, { onDelete: 'cascade' }),
+    key: stableKey().notNull(),
+    title: varchar('title', { length: 60 }).notNull().default(''),
+    definition: json('definition').$type<OwnCalculatorDefinition>().notNull(),
+    /** The newest version that was kept, or null. */
+    attachable: int('attachable', { unsigned: true }),
+    version: int('version', { unsigned: true }).notNull().default(1),
+    savedAt: moment('saved_at').notNull().default(sql`CURRENT_TIMESTAMP(3)`),
+    createdAt: createdAt(),
+  },
+  (t) => [unique('own_calculators_key').on(t.courseId, t.key)],
+)
+
+/** A version as it was kept; rows are added and never changed. */
+export const ownCalculatorVersions = mysqlTable(
+  'own_calculator_versions',
+  {
+    id: id(),
+    calculatorId: reference('calculator_id')
+      .notNull()
+      .references(() => ownCalculators.id, { onDelete: 'cascade' }),
+    number: int('number', { unsigned: true }).notNull(),
+    definition: json('definition').$type<OwnCalculatorDefinition>().notNull(),
+    createdById: reference('created_by_id').references(() => users.id, { onDelete: 'set null' }),
+    createdAt: createdAt(),
+  },
+  (t) => [unique('own_calculator_versions_number').on(t.calculatorId, t.number)],
 )
 
 /** How one person stands at one stop; the seed gives them numbers of their own. */
