@@ -1,4 +1,5 @@
 import type { Calculator } from './calculator'
+import { batch } from './batch'
 import { coating } from './coating'
 import { corner } from './corner'
 import { diagonals } from './diagonals'
@@ -36,6 +37,7 @@ export const calculators: readonly Calculator[] = [
   posthole,
   fixings,
   rafter,
+  batch,
 ]
 
 /** The calculator of this id. */

@@ -1,3 +1,4 @@
+import concreteBatch from './concrete-batch.json'
 import postFooting from './post-footing.json'
 import controlJoints from './control-joints.json'
 import concreteVolume from './concrete-volume.json'
@@ -35,6 +36,7 @@ const files = {
   snowLoad,
   squaring,
   postFooting,
+  concreteBatch,
 } as const
 
 /** Every case whose id matches; a pattern that matches none is an error, so that no table runs empty. */

@@ -1,3 +1,4 @@
+import { drawBatchPicture } from './batchSheet'
 import { drawRafterPicture } from './rafterPicture'
 import { drawPostholePicture } from './postholeSheet'
 import { drawGravelPicture } from './gravelSheet'
@@ -64,6 +65,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   posthole: drawPostholePicture,
   fixings: drawFixingsPicture,
   rafter: drawRafterPicture,
+  batch: drawBatchPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -27,6 +27,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   posthole: async () => (await import('./postholeSheet')).drawPostholeSheet,
   fixings: async () => (await import('./fixingsSheet')).drawFixingsSheet,
   rafter: async () => (await import('./rafterSheet')).drawRafterSheet,
+  batch: async () => (await import('./batchSheet')).drawBatchSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -5,7 +5,7 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
     about: 'Setting out and digging',
     ids: ['square', 'diagonals', 'fall', 'corner', 'posthole'],
   },
-  { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints', 'gravel'] },
+  { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints', 'gravel', 'batch'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
   { title: 'Cladding', about: 'Boards', ids: ['taper'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid', 'rafter'] },
