@@ -1,5 +1,6 @@
 import type { Calculator } from './calculator'
 import { batch } from './batch'
+import { boards } from './boards'
 import { coating } from './coating'
 import { corner } from './corner'
 import { diagonals } from './diagonals'
@@ -38,6 +39,7 @@ export const calculators: readonly Calculator[] = [
   fixings,
   rafter,
   batch,
+  boards,
 ]
 
 /** The calculator of this id. */

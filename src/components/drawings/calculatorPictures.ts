@@ -1,3 +1,4 @@
+import { drawBoardsPicture } from './boardsPicture'
 import { drawBatchPicture } from './batchSheet'
 import { drawRafterPicture } from './rafterPicture'
 import { drawPostholePicture } from './postholeSheet'
@@ -66,6 +67,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   fixings: drawFixingsPicture,
   rafter: drawRafterPicture,
   batch: drawBatchPicture,
+  boards: drawBoardsPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -28,6 +28,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   fixings: async () => (await import('./fixingsSheet')).drawFixingsSheet,
   rafter: async () => (await import('./rafterSheet')).drawRafterSheet,
   batch: async () => (await import('./batchSheet')).drawBatchSheet,
+  boards: async () => (await import('./boardsSheet')).drawBoardsSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

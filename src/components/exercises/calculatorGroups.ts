@@ -7,7 +7,7 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   },
   { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints', 'gravel', 'batch'] },
   { title: 'Frame', about: 'Slopes', ids: ['pitch'] },
-  { title: 'Cladding', about: 'Boards', ids: ['taper'] },
+  { title: 'Cladding', about: 'Boards', ids: ['taper', 'boards'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid', 'rafter'] },
   { title: 'Finish', about: 'Screws and oil', ids: ['coating', 'fixings'] },
 ]
