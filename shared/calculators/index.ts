@@ -16,6 +16,7 @@ import { rafter } from './rafter'
 import { sheets } from './sheets'
 import { slab } from './slab'
 import { snow } from './snow'
+import { spacing } from './spacing'
 import { square } from './square'
 import { taper } from './taper'
 
@@ -40,6 +41,7 @@ export const calculators: readonly Calculator[] = [
   rafter,
   batch,
   boards,
+  spacing,
 ]
 
 /** The calculator of this id. */

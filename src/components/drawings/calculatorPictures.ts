@@ -1,3 +1,4 @@
+import { drawSpacingPicture } from './spacingPicture'
 import { drawBoardsPicture } from './boardsPicture'
 import { drawBatchPicture } from './batchSheet'
 import { drawRafterPicture } from './rafterPicture'
@@ -68,6 +69,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   rafter: drawRafterPicture,
   batch: drawBatchPicture,
   boards: drawBoardsPicture,
+  spacing: drawSpacingPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -29,6 +29,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   rafter: async () => (await import('./rafterSheet')).drawRafterSheet,
   batch: async () => (await import('./batchSheet')).drawBatchSheet,
   boards: async () => (await import('./boardsSheet')).drawBoardsSheet,
+  spacing: async () => (await import('./spacingSheet')).drawSpacingSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
