@@ -1,5 +1,7 @@
 import type { Drawing } from './drawing'
+import { formatDrawnLength } from './figures'
 import { tenth } from './marks'
+import type { UnitSystem } from '../../../shared/contracts/exercises'
 
 /** Members that stand in a row, in metres: where each begins, how wide it is, and how long the row is. */
 export interface Row {
@@ -71,6 +73,20 @@ function breakRow({ starts, width, last, total }: Row, left: number, room: numbe
   })
   const breakAt = ((before.at(-1)?.right ?? left) + (after[0]?.left ?? left + room)) / 2
   return { staves: [...before, ...after], breakAt, isWidened: wide > width * scale + 1 }
+}
+
+/** The first marks of a stick and the last one, as many as the sheet has room for; all stand among the results. */
+export function describeMarks(
+  drawing: Drawing,
+  marks: readonly number[],
+  system: UnitSystem,
+): string {
+  const texts = marks.map((mark) => formatDrawnLength(mark, system))
+  const short = (first: number) => [...texts.slice(0, first), '…', texts.at(-1) ?? '']
+  const ways = texts.length > 4 ? [short(3), short(2), short(1)] : [texts, short(2), short(1)]
+  const lines = ways.map((way) => `marks: ${way.join(', ')}`)
+  const fitting = lines.find((line) => drawing.textWidth(line) < drawing.width - 60)
+  return fitting ?? lines.at(-1) ?? ''
 }
 
 /** The two waves that say that something was left out. */

@@ -1,4 +1,4 @@
-import { drawBreak, layOutRow, type LaidRow } from './boardsRow'
+import { describeMarks, drawBreak, layOutRow, type LaidRow } from './boardsRow'
 import {
   figureOf,
   lengthFigure,
@@ -9,7 +9,6 @@ import {
 } from './calculatorSheet'
 import { dimensionRow } from './dimensions'
 import { Drawing } from './drawing'
-import { formatDrawnLength } from './figures'
 
 interface Boards {
   opening: number
@@ -99,19 +98,18 @@ function letterBoards(
   return line
 }
 
-/** The first marks of the stick and the last one; all of them stand among the results. */
-function describeMarks(input: CalculatorSheetInput, { starts }: Boards): string {
-  const texts = starts.map((start) => formatDrawnLength(start, input.system))
-  const shown = texts.length > 4 ? [...texts.slice(0, 3), '…', texts.at(-1) ?? ''] : texts
-  return `marks: ${shown.join(', ')}`
-}
-
-function captions(input: CalculatorSheetInput, boards: Boards, row: LaidRow): [string, string][] {
+function captions(
+  drawing: Drawing,
+  input: CalculatorSheetInput,
+  boards: Boards,
+  row: LaidRow,
+): [string, string][] {
   const count = figureOf(input, 'count', String(boards.count))
   const lines: [string, string][] = [
     [`${count.text} ${boards.count === 1 ? 'board' : 'boards'}`, count.chalk ? 'askt' : 'vtitle'],
   ]
-  if (!input.asked && input.outputs?.marks) lines.push([describeMarks(input, boards), 'tx'])
+  if (!input.asked && input.outputs?.marks)
+    lines.push([describeMarks(drawing, boards.starts, input.system), 'tx'])
   if (boards.last < boards.width / 3 && !input.asked)
     lines.push(['the last board is a thin strip: share it', 'slipt'])
   if (row.breakAt !== undefined) lines.push(['row cut short', 'vsub'])
@@ -137,7 +135,7 @@ export function drawBoardsSheet(input: CalculatorSheetInput): CalculatorSheet | 
   )
   drawBoards(drawing, area, row, boards.last < boards.width - 1e-9)
   const line = letterBoards(drawing, input, boards, area, row)
-  const lines = captions(input, boards, row)
+  const lines = captions(drawing, input, boards, row)
   const start = narrow ? 20 : area.left
   lines.forEach(([text, style], at) => drawing.text(start, line + 34 + at * 19, text, style))
   drawing.height = line + 34 + lines.length * 19 - 6

@@ -1,4 +1,4 @@
-import { drawBreak, layOutRow, type LaidRow, type Stave } from './boardsRow'
+import { describeMarks, drawBreak, layOutRow, type LaidRow, type Stave } from './boardsRow'
 import {
   figureOf,
   lengthFigure,
@@ -76,18 +76,20 @@ function letterMembers(
   return area.base + 4 + step * rows.length
 }
 
-function captions(input: CalculatorSheetInput, spacing: Spacing, row: LaidRow): [string, string][] {
+function captions(
+  drawing: Drawing,
+  input: CalculatorSheetInput,
+  spacing: Spacing,
+  row: LaidRow,
+): [string, string][] {
   const count = figureOf(input, 'count', String(spacing.count))
   const lines: [string, string][] = [
     [`${count.text} in all`, count.chalk ? 'askt' : 'vtitle'],
     [`centres at most ${formatDrawnLength(Number(input.values.maxCentres), input.system)}`, 'tx'],
   ]
   const marks = input.outputs?.marks
-  if (!input.asked && Array.isArray(marks)) {
-    const texts = (marks as readonly number[]).map((one) => formatDrawnLength(one, input.system))
-    const shown = texts.length > 4 ? [...texts.slice(0, 3), '…', texts.at(-1) ?? ''] : texts
-    lines.push([`marks: ${shown.join(', ')}`, 'tx'])
-  }
+  if (!input.asked && Array.isArray(marks))
+    lines.push([describeMarks(drawing, marks as readonly number[], input.system), 'tx'])
   if (row.breakAt !== undefined) lines.push(['row cut short', 'vsub'])
   if (row.isWidened) lines.push(['members drawn wider than they are', 'vsub'])
   return lines
@@ -109,7 +111,7 @@ export function drawSpacingSheet(input: CalculatorSheetInput): CalculatorSheet |
   if (!first || !second) return null
   drawMembers(drawing, area, row)
   const line = letterMembers(drawing, input, spacing, area, [first, second])
-  const lines = captions(input, spacing, row)
+  const lines = captions(drawing, input, spacing, row)
   const start = narrow ? 20 : area.left
   lines.forEach(([text, style], at) => drawing.text(start, line + 34 + at * 19, text, style))
   drawing.height = line + 34 + lines.length * 19 - 6
