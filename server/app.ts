@@ -1,3 +1,4 @@
+import type { IncomingMessage } from 'node:http'
 import express, { type Express, type RequestHandler } from 'express'
 import helmet from 'helmet'
 import { pinoHttp } from 'pino-http'
@@ -22,11 +23,18 @@ import { sessionMiddleware } from './middleware/session'
 import { clientPage, staticFiles } from './middleware/staticFiles'
 import { progressRouter } from './progress/progress.routes'
 
+/**
+ * Compiling WebAssembly counts as evaluating code. Only the worker that searches for cut lists does that, with the
+ * solver that we serve ourselves; a worker obeys the policy its own script comes with, so the pages need not allow it.
+ */
+const solverSource = ({ url = '' }: IncomingMessage) =>
+  /^\/assets\/cutlist\.worker-[\w-]+\.js$/.test(url) ? "'wasm-unsafe-eval'" : ''
+
 const contentSecurity = {
   useDefaults: false,
   directives: {
     defaultSrc: ["'self'"],
-    scriptSrc: ["'self'"],
+    scriptSrc: ["'self'", solverSource],
     styleSrc: ["'self'"],
     imgSrc: ["'self'", 'data:', 'blob:'],
     fontSrc: ["'self'"],

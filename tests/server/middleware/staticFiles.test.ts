@@ -92,6 +92,20 @@ describe('the client files', () => {
     expect(policy).not.toMatch(/unsafe|\*|https?:/)
   })
 
+  it('3.4.3 lets the worker of cut lists, and no page, compile its solver', async () => {
+    const policyOf = async (path: string) =>
+      (await fetch(app.url + path)).headers.get('content-security-policy') ?? ''
+    const worker = await policyOf('/assets/cutlist.worker-BP1KD_Q-.js')
+    expect(worker).toContain("script-src 'self' 'wasm-unsafe-eval';")
+    for (const path of [
+      '/assets/page-abc.js',
+      '/cut?/assets/cutlist.worker-a.js',
+      '/api/nothing',
+    ]) {
+      expect(await policyOf(path)).not.toContain('unsafe')
+    }
+  })
+
   it('3.4.6 cannot be framed', async () => {
     const { headers } = await fetch(app.url)
     expect(headers.get('content-security-policy')).toContain("frame-ancestors 'none'")
