@@ -9,7 +9,7 @@ import type { Plugin } from 'vite'
 import { defineConfig } from 'vitest/config'
 
 const clientFolder = 'dist/client'
-const compressedKinds = new Set(['.js', '.css', '.html', '.svg', '.json', '.vtt'])
+const compressedKinds = new Set(['.js', '.css', '.html', '.svg', '.json', '.vtt', '.wasm'])
 const smallestCompressedBytes = 1024
 /** No test is about speed; a busy machine may take this long over one. */
 const patience = 60_000

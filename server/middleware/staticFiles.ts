@@ -12,6 +12,7 @@ const contentTypes: Record<string, string> = {
   '.svg': 'image/svg+xml',
   '.html': 'text/html; charset=utf-8',
   '.json': 'application/json',
+  '.wasm': 'application/wasm',
 }
 
 /** Serves the compressed file beside the asked one when the browser takes it. */
