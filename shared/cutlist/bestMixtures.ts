@@ -6,15 +6,18 @@ import type { PackingProblem } from './sectionProblem'
 
 /**
  * Bar after bar, each with the widest piece left and the mixture that fills it best, as often as the pieces last;
- * of several offers the one that costs least for the width it uses. Null where stock runs out.
+ * of the allowed offers the one that costs least for the width it uses. Null where stock runs out.
  */
 export function bestMixtures(
   problem: PackingProblem,
   goal: Goal,
   remainder: Remainder,
+  allowed: readonly number[],
 ): PlanLine[] | null {
   const pieces = [...remainder.pieces]
-  const left = remainder.bars.map((count) => count ?? Infinity)
+  const left = remainder.bars.map((count, offer) =>
+    allowed.includes(offer) ? (count ?? Infinity) : 0,
+  )
   const lines: PlanLine[] = []
   while (pieces.some((count) => count > 0)) {
     const pattern = nextMixture(problem, goal, pieces, left)
@@ -76,9 +79,13 @@ export function completePlan(
       at(goal.costs, one) * (offers[other]?.capacity ?? 0) -
       at(goal.costs, other) * (offers[one]?.capacity ?? 0),
   )
+  const limited = all.filter((offer) => remainder.bars[offer] !== null)
   const orders = [byCost, byLength, ...all.map((offer) => [offer, ...byCost])]
+  const choices = [all, ...all.map((offer) => [offer, ...limited])]
   const plans = [
-    bestMixtures(problem, goal, remainder),
+    ...(offers.length > 1 ? choices : [all]).map((allowed) =>
+      bestMixtures(problem, goal, remainder, allowed),
+    ),
     ...(offers.length > 1 ? orders : [all]).map((order) => firstFit(problem, remainder, order)),
   ]
   let best: { plan: PlanLine[]; cost: number } | null = null
