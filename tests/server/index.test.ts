@@ -1,4 +1,5 @@
 import { spawn, type ChildProcess } from 'node:child_process'
+import { once } from 'node:events'
 import { mkdir, mkdtemp, rm } from 'node:fs/promises'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
@@ -35,8 +36,12 @@ afterAll(async () => {
 const startOwnDatabase = () =>
   startDatabase({ folder: join(folder, 'mariadb'), database: 'good_footing' })
 
+/** Breaks the server from within, as an error would that nobody catches. */
+const fault = `data:text/javascript,process.on('SIGUSR2',()=>{throw new Error('nobody foresaw this')})`
+
 async function startServer(): Promise<ChildProcess> {
-  const child = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts'], {
+  const imports = ['--import', 'tsx', '--import', fault]
+  const child = spawn(process.execPath, [...imports, 'server/index.ts'], {
     stdio: ['ignore', 'ignore', 'inherit', 'ipc'],
     env: {
       ...process.env,
@@ -116,4 +121,16 @@ describe('a crash', () => {
     expect(await signUp('after-database@example.org')).toBe(true)
     expect(server.exitCode).toBeNull()
   }, 90_000)
+})
+
+describe('16.5.4 an error that nobody caught', () => {
+  it('ends the server in order, what was acknowledged is kept', async () => {
+    expect(await signUp('before-fault@example.org')).toBe(true)
+    server.kill('SIGUSR2')
+    const [code] = (await once(server, 'exit')) as [number]
+    expect(code).toBe(1)
+    expect(await findLost(['before-fault@example.org'])).toEqual([])
+    server = await startServer()
+    expect(await signUp('after-fault@example.org')).toBe(true)
+  }, 60_000)
 })

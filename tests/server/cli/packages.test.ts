@@ -13,6 +13,23 @@ function layOutMachine(folder: string, exitCode = 0) {
 const say = vi.fn()
 const install = (withTests: boolean) => installMissingPackages({ withTests, say })
 
+describe('the inventory of packages', () => {
+  it('15.1.2 names every package the project depends on, and why', () => {
+    const manifest = JSON.parse(readFileSync('package.json', 'utf8')) as Record<string, object>
+    const wanted = Object.keys({ ...manifest['dependencies'], ...manifest['devDependencies'] })
+    const table = readFileSync('DEVELOPERS.md', 'utf8')
+      .split('\n')
+      .filter((line) => line.startsWith('| '))
+      .map((line) => line.split('|')[1] ?? '')
+    const named = table
+      .join(',')
+      .replaceAll('`', '')
+      .split(/[,(]/)
+      .map((name) => name.trim())
+    expect(wanted.filter((name) => !named.includes(name))).toEqual([])
+  })
+})
+
 describe('installMissingPackages', () => {
   let folder = ''
   beforeEach(() => {

@@ -161,6 +161,18 @@ describe('GET /api/courses/:slug', () => {
     expect(sheetSchema.parse(body)).toMatchObject({ state: 'closed', can: { enrol: false } })
   })
 
+  it.each([`' or 1=1 -- `, `'; drop table courses; -- `, '%25', '" union select passphrase'])(
+    '1.2.4 takes %s for a name, never for a command',
+    async (name) => {
+      const visitor = app.asVisitor()
+      const { status } = await visitor.get(`/api/courses/${encodeURIComponent(name)}`)
+      expect([400, 404]).toContain(status)
+      const filtered = await visitor.get('/api/courses').query({ cover: name, cursor: name })
+      expect(filtered.status).toBe(400)
+      await visitor.get('/api/courses').expect(200)
+    },
+  )
+
   it('answers 404 with a problem for a course that is not there', async () => {
     const { body, type } = await app.asVisitor().get('/api/courses/nothing-here').expect(404)
     expect(type).toBe('application/problem+json')

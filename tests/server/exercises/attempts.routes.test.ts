@@ -133,7 +133,7 @@ describe('POST …/attempts', () => {
     })
   })
 
-  it('counts twenty wrong answers that come at once as twenty tries', async () => {
+  it('15.4.2 counts twenty wrong answers that come at once as twenty tries', async () => {
     const { course, path } = await createStopCourse({ tries: null })
     const { learner, agent } = await createLearnerIn(app, course)
     const answers = await Promise.all(

@@ -43,7 +43,7 @@ describe('judgeVideo', () => {
     expect(!judgement.isUsable && judgement.refusal).toContain('H.264')
   })
 
-  it('goes by what is in a file, not by its name', async () => {
+  it('5.2.2 goes by what is in a file, not by its name', async () => {
     const film = join(folder, 'notes.txt')
     copyFileSync(filmPath('plain.mp4'), film)
     expect(await judge(film)).toMatchObject({ isUsable: true })

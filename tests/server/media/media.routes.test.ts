@@ -87,7 +87,7 @@ describe('GET media/videos/:videoId/file', () => {
     expect(Buffer.compare(answer.body as Buffer, bytes.subarray(from, from + length))).toBe(0)
   })
 
-  it('answers HEAD as GET without the bytes', async () => {
+  it('3.2.1 answers HEAD as GET without the bytes', async () => {
     const { learner, file } = await setUp()
     const agent = await app.asUser(learner)
     const whole = await agent.head(file).expect(200)
@@ -148,7 +148,7 @@ describe('GET media/videos/:videoId/file', () => {
     expect(await statusOf(await createUser(), poster)).toBe(200)
   })
 
-  it('waits for the kit check of its lesson, the poster does not', async () => {
+  it('2.3.1 waits for the kit check of its lesson, the poster does not', async () => {
     let kit: { id: number }[] = []
     const { learner, course, file, poster } = await setUp({
       furnish: async ({ id }) => {

@@ -118,6 +118,25 @@ describe('uploads', () => {
     expect((await readdir(join(config.dataDir, 'uploads'))).join()).not.toContain(path.slice(1))
   })
 
+  it('5.4.1 keep a file under a name of ours, whatever its own says', async () => {
+    const { lesson, begin, patch, findVideo } = await setUp()
+    const filename = '../../../../escaped"; rm -rf ~.mp4'
+    const film = readFilm('plain.mp4')
+    const { headers } = await begin(film.length, {
+      headers: { 'Upload-Metadata': metadata({ lessonId: String(lesson.id), filename }) },
+    })
+    const path = (headers.location ?? '').replace('/api/uploads', '')
+    expect(path).toMatch(/^\/[0-9a-f]{32}$/)
+    await patch(path, 0, film)
+    await waitUntilChecked(lesson.key)
+    const video = await findVideo()
+    expect(video?.storageKey).toMatch(/^[\w/.-]+$/)
+    expect(video?.storageKey).not.toContain('..')
+    const kept = await readdir(config.dataDir, { recursive: true })
+    const outside = await readdir(join(config.dataDir, '..'))
+    expect([...kept, ...outside].filter((name) => name.includes('rm -rf'))).toEqual([])
+  })
+
   it('belong to the one who began them', async () => {
     const { course, open, patch, head } = await setUp()
     const path = await open(1000)
