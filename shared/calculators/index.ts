@@ -12,6 +12,7 @@ import { lid } from './lid'
 import { mix } from './mix'
 import { pitch } from './pitch'
 import { posthole } from './posthole'
+import { postsOnFall } from './postsOnFall'
 import { rafter } from './rafter'
 import { sheets } from './sheets'
 import { slab } from './slab'
@@ -42,6 +43,7 @@ export const calculators: readonly Calculator[] = [
   batch,
   boards,
   spacing,
+  postsOnFall,
 ]
 
 /** The calculator of this id. */

@@ -1,3 +1,4 @@
+import { drawPostsOnFallPicture } from './postsOnFallSheet'
 import { drawSpacingPicture } from './spacingPicture'
 import { drawBoardsPicture } from './boardsPicture'
 import { drawBatchPicture } from './batchSheet'
@@ -70,6 +71,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   batch: drawBatchPicture,
   boards: drawBoardsPicture,
   spacing: drawSpacingPicture,
+  'posts-on-fall': drawPostsOnFallPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -30,6 +30,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   batch: async () => (await import('./batchSheet')).drawBatchSheet,
   boards: async () => (await import('./boardsSheet')).drawBoardsSheet,
   spacing: async () => (await import('./spacingSheet')).drawSpacingSheet,
+  'posts-on-fall': async () => (await import('./postsOnFallSheet')).drawPostsOnFallSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
