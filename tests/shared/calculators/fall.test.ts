@@ -146,7 +146,7 @@ describe('fall refuses', () => {
     ['ratio', '1:5', 'Ratio, drop to run: 1:5 is out of range. Give 0 to 1:10.'],
     ['angle', '90 deg', 'Angle: 90° is out of range. Give 0° to 5.71°.'],
   ])('%s of %s', (name, text, message) => {
-    const other = name === 'run' ? { percent: '2' } : { run: '3 m' }
+    const other: Record<string, string> = name === 'run' ? { percent: '2' } : { run: '3 m' }
     const errors = refuse('fall', { ...other, [name]: text })
     expect(errors[name]?.replaceAll(/\s/g, ' ')).toBe(message)
   })
