@@ -1,4 +1,5 @@
 import type { Calculator } from './calculator'
+import { angleCut } from './angleCut'
 import { batch } from './batch'
 import { boards } from './boards'
 import { coating } from './coating'
@@ -44,6 +45,7 @@ export const calculators: readonly Calculator[] = [
   boards,
   spacing,
   postsOnFall,
+  angleCut,
 ]
 
 /** The calculator of this id. */

@@ -1,3 +1,4 @@
+import { drawAngleCutPicture } from './angleCutPicture'
 import { drawPostsOnFallPicture } from './postsOnFallSheet'
 import { drawSpacingPicture } from './spacingPicture'
 import { drawBoardsPicture } from './boardsPicture'
@@ -72,6 +73,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   boards: drawBoardsPicture,
   spacing: drawSpacingPicture,
   'posts-on-fall': drawPostsOnFallPicture,
+  'angle-cut': drawAngleCutPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

@@ -31,6 +31,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   boards: async () => (await import('./boardsSheet')).drawBoardsSheet,
   spacing: async () => (await import('./spacingSheet')).drawSpacingSheet,
   'posts-on-fall': async () => (await import('./postsOnFallSheet')).drawPostsOnFallSheet,
+  'angle-cut': async () => (await import('./angleCutSheet')).drawAngleCutSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -6,7 +6,11 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
     ids: ['square', 'diagonals', 'fall', 'corner', 'posthole'],
   },
   { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints', 'gravel', 'batch'] },
-  { title: 'Frame', about: 'Posts and slopes', ids: ['pitch', 'spacing', 'posts-on-fall'] },
+  {
+    title: 'Frame',
+    about: 'Posts and slopes',
+    ids: ['pitch', 'spacing', 'posts-on-fall', 'angle-cut'],
+  },
   { title: 'Cladding', about: 'Boards', ids: ['taper', 'boards'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid', 'rafter'] },
   { title: 'Finish', about: 'Screws and oil', ids: ['coating', 'fixings'] },
