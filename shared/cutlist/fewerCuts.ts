@@ -5,7 +5,7 @@ import type { PackingProblem } from './sectionProblem'
 const mostTries = 200_000
 
 /**
- * The same bars and pieces with fewer different cuts, so that the saw stop is set less often: two patterns become
+ * The same pieces, from no other bars, with fewer different cuts, so that the saw stop is set less often: two patterns become
  * one, or three become two, wherever their pieces can be shared out anew. A good plan, not a proved one.
  */
 export function useFewerCuts(problem: PackingProblem, plan: Plan): PlanLine[] {

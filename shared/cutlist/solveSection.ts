@@ -3,6 +3,7 @@ import { completePlan } from './bestMixtures'
 import { notEnough } from './checkCutRequest'
 import type { CutProof, SolvedSection } from './cutList'
 import { useFewerCuts } from './fewerCuts'
+import { searchFewerCuts } from './fewestCuts'
 import type { Deadline, LpSolver } from './lpSolver'
 import { wholeRemainder, type Goal } from './master'
 import { measurePlan, type Plan } from './patterns'
@@ -50,7 +51,8 @@ export function solveAtOnce(problem: SectionProblem): SolvedSection | null {
   const plan = useFewerCuts(problem, found)
   const { cost } = measurePlan(problem, plan)
   const bound = reachableCosts(problem, goal.costs)(0)
-  return { problem, plan, proof: proofOf({ cost, bound }, isPricedByLength(problem)) }
+  const proof = proofOf({ cost, bound }, isPricedByLength(problem))
+  return { problem, plan: proof === 'optimal' ? searchFewerCuts(problem, plan) : plan, proof }
 }
 
 /** Searches for the least cost, then the least bought length at that cost, then fewer different cuts. */
@@ -65,7 +67,7 @@ export function solveSection(problem: SectionProblem, tools: SectionTools): Solv
     ? cheapest
     : searchGoal(problem, lengthGoal(problem, cheapest.cost), cheapest.plan, true, tools)
   const plan = useFewerCuts(problem, last.plan ?? cheapest.plan)
-  return { problem, plan, proof: proofOf(last, true) }
+  return { problem, plan: searchFewerCuts(problem, plan), proof: proofOf(last, true) }
 }
 
 const noPlanSentence = ({ section }: SectionProblem, { bound }: Search) =>

@@ -35,7 +35,7 @@ describe('useFewerCuts', () => {
     expect(useFewerCuts(problem, plan)).toEqual(plan)
   })
 
-  it('keeps bars and pieces and never adds a pattern', () => {
+  it('cuts the same pieces from no other bars, and never adds a pattern', () => {
     const anyLine = fc
       .tuple(
         fc.nat({ max: 1 }),
@@ -50,7 +50,8 @@ describe('useFewerCuts', () => {
         const fewer = useFewerCuts(problem, plan)
         expect(fewer.length).toBeLessThanOrEqual(plan.length)
         expect(countPieces(problem, fewer)).toEqual(countPieces(problem, plan))
-        expect(countBars(problem, fewer)).toEqual(countBars(problem, plan))
+        const [bars, before] = [countBars(problem, fewer), countBars(problem, plan)]
+        expect(bars.every((count, offer) => count <= before[offer]!)).toBe(true)
         expect(isPlanSound(problem, fewer)).toBe(true)
       }),
     )
