@@ -2,6 +2,7 @@ import { statSync } from 'node:fs'
 import type { Page, Request } from '@playwright/test'
 import { lessonIdOf, lessonPath, makeCourse, readLesson } from './support/bench'
 import { longFilm } from './support/films'
+import { beginLesson } from './support/lesson'
 import { layLine, sendSlowly } from './support/line'
 import { comeInstructor } from './support/people'
 import { expect, test } from './support/watched'
@@ -68,4 +69,32 @@ test('a cut line is told, and the video goes on by itself when it is back', asyn
   await expectReady(page, lessonId)
   expect(Math.max(...offsets)).toBeGreaterThan(filmBytes * 0.1)
   wire.takeUp()
+})
+
+/** What the page holds after its rubbish was collected. */
+async function countHeld(page: Page) {
+  const session = await page.context().newCDPSession(page)
+  await session.send('Performance.enable')
+  await session.send('HeapProfiler.collectGarbage')
+  const { metrics } = await session.send('Performance.getMetrics')
+  const valueOf = (name: string) => metrics.find((metric) => metric.name === name)?.value
+  return { nodes: valueOf('Nodes'), listeners: valueOf('JSEventListeners') }
+}
+
+test('fifty changes between sheet and lesson leave no player behind', async ({ page }) => {
+  await page.goto('/sheets/a-log-store-on-a-concrete-pad')
+  const comeAndGo = async () => {
+    await page.getByRole('link', { name: 'Reading your ground' }).first().click()
+    await page.locator('video').waitFor({ state: 'attached' })
+    await page.goBack()
+    await page.getByRole('heading', { name: 'Stages and lessons' }).waitFor()
+  }
+  await page.getByRole('link', { name: 'Reading your ground' }).first().click()
+  await beginLesson(page)
+  await page.goBack()
+  for (let round = 0; round < 3; round++) await comeAndGo()
+  const before = await countHeld(page)
+  for (let round = 0; round < 22; round++) await comeAndGo()
+  await expect(page.locator('video')).toHaveCount(0)
+  expect(await countHeld(page)).toEqual(before)
 })
