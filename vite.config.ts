@@ -1,5 +1,6 @@
+import { readdirSync } from 'node:fs'
 import { readdir, readFile, writeFile } from 'node:fs/promises'
-import { extname, join } from 'node:path'
+import { basename, extname, join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { promisify } from 'node:util'
 import { brotliCompress, constants, gzip } from 'node:zlib'
@@ -34,6 +35,26 @@ function precompress(folder: string): Plugin {
   }
 }
 
+/** The server and, beside it, each of its worker threads, which are started from a file of their own. */
+function serverEntries(): Record<string, string> {
+  const files = readdirSync('server', { recursive: true, encoding: 'utf8' })
+  const workers = files.filter((file) => file.endsWith('.worker.ts'))
+  return Object.fromEntries<string>([
+    ['index', 'server/index.ts'],
+    ...workers.map((file): [string, string] => [basename(file, '.ts'), join('server', file)]),
+  ])
+}
+
+const serverBuild = {
+  target: 'node20',
+  sourcemap: true,
+  outDir: 'dist/server',
+  rollupOptions: {
+    input: serverEntries(),
+    output: { entryFileNames: '[name].js', chunkFileNames: '[name]-[hash].js' },
+  },
+}
+
 export default defineConfig(({ isSsrBuild }) => ({
   plugins: [
     vue({ template: { transformAssetUrls } }),
@@ -50,7 +71,7 @@ export default defineConfig(({ isSsrBuild }) => ({
     manifest: !isSsrBuild,
     modulePreload: { polyfill: false },
     reportCompressedSize: false,
-    ...(isSsrBuild ? { target: 'node20', sourcemap: true } : {}),
+    ...(isSsrBuild ? serverBuild : {}),
   },
   test: {
     restoreMocks: true,

@@ -15,7 +15,7 @@ const sources = [
   'package-lock.json',
 ]
 const stampFile = 'dist/.sources'
-const serverBuild = ['--ssr', 'server/index.ts', '--outDir', 'dist/server']
+const serverBuild = ['--ssr']
 
 /** Builds client and server into dist/ unless they were built from the very same sources. */
 export async function buildWhenChanged(say: (sentence: string) => void): Promise<void> {
