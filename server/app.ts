@@ -11,6 +11,7 @@ import { lessonsRouter } from './courses/lessons.routes'
 import { registerRouter } from './courses/register.routes'
 import { attemptsRouter } from './exercises/attempts.routes'
 import { benchStopsRouter } from './exercises/benchStops.routes'
+import { ownCalculatorsRouter } from './exercises/ownCalculators.routes'
 import { questionsRouter } from './fence/questions.routes'
 import { logger } from './logger'
 import { captionsRouter } from './media/captions.routes'
@@ -90,6 +91,7 @@ export function createApp({ devClient }: AppOptions = {}): Express {
     benchCoursesRouter,
     benchLessonsRouter,
     benchStopsRouter,
+    ownCalculatorsRouter,
   )
   app.use('/api', apiNotFound)
   app.use('/api', errorHandler)

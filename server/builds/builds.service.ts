@@ -5,6 +5,7 @@ import type { Page, PageQuery } from '../../shared/contracts/pagination'
 import { revisionFor, type CourseAccess } from '../courses/access.service'
 import { describeStages, findDrawnBy, nameRevision } from '../courses/sheets.service'
 import type { Transaction } from '../db/client'
+import { nameOwnCalculators } from '../exercises/ownCalculators.service'
 import { notFound } from '../errors'
 import { readCursor } from '../paging'
 import { findLessonStates } from '../progress/lessonProgress.service'
@@ -49,9 +50,10 @@ async function listLately(
   buildId: number,
   done: Happening[],
 ): Promise<Build['lately']> {
-  const [right, entries] = await Promise.all([
+  const [right, entries, own] = await Promise.all([
     listRightAnswers(userId, courseId, latelyLength),
     listEntries(buildId, null, latelyLength),
+    nameOwnCalculators(courseId),
   ])
   const all: Happening[] = [
     ...done,
@@ -62,7 +64,7 @@ async function listLately(
     })),
     ...entries.map(({ createdAt, calculator, lessonKey }) => ({
       at: createdAt,
-      text: `“${findCalculator(calculator)?.title ?? calculator}” put in the field book`,
+      text: `“${findCalculator(calculator)?.title ?? own.get(calculator) ?? calculator}” put in the field book`,
       lessonKey,
     })),
   ]

@@ -1,11 +1,14 @@
 import type { FieldBookEntry, PutInFieldBook } from '../../shared/contracts/builds'
 import type { FieldError } from '../../shared/contracts/errors'
 import type { Page, PageQuery } from '../../shared/contracts/pagination'
-import type { Calculator, Values } from '../../shared/calculators/calculator'
-import { findCalculator, runCalculator } from '../../shared/calculators'
+import type { Values } from '../../shared/calculators/calculator'
+import { findCalculator } from '../../shared/calculators'
+import { OWN_PREFIX } from '../../shared/contracts/ownCalculators'
 import { answerOnce } from '../accounts/idempotency.service'
 import type { CourseAccess } from '../courses/access.service'
 import { invalid } from '../errors'
+import { findOwnAtStop } from '../exercises/ownCalculators.service'
+import { workCalculator } from '../exercises/ownCalculatorTasks.service'
 import { readCursor } from '../paging'
 import { hasLesson, hasStop, insertEntry, listEntries, type EntryRow } from './fieldBook.queries'
 import { findOwnBuild } from './builds.service'
@@ -15,10 +18,13 @@ const present = ({ buildId: _buildId, createdAt, ...row }: EntryRow): FieldBookE
   createdAt: createdAt.toISOString(),
 })
 
-function compute(calculator: Calculator, entry: PutInFieldBook) {
-  const names = new Set(calculator.inputs.map(({ name }) => name))
+type Which = Parameters<typeof workCalculator>[0]
+
+async function compute(calculator: Which, entry: PutInFieldBook) {
+  const { inputs } = 'definition' in calculator ? calculator.definition : calculator
+  const names = new Set(inputs.map(({ name }) => name))
   const unknown = Object.keys(entry.inputs).filter((name) => !names.has(name))
-  const run = runCalculator(calculator, entry.inputs, entry.units)
+  const run = await workCalculator(calculator, entry.inputs, entry.units)
   const errors: FieldError[] = [
     ...unknown.map((name) => ({
       field: `inputs.${name}`,
@@ -57,6 +63,17 @@ async function checkPlace({ lessonKey, stopKey }: PutInFieldBook, revisionId: nu
   }
 }
 
+/** A built-in calculator by its id; an own one as the stop that the entry names is made of it. */
+async function findWhich(entry: PutInFieldBook, revisionId: number): Promise<Which | undefined> {
+  const { calculator: id, lessonKey, stopKey } = entry
+  if (!id.startsWith(OWN_PREFIX)) return findCalculator(id)
+  const own =
+    lessonKey === null || stopKey === null
+      ? null
+      : await findOwnAtStop(revisionId, lessonKey, stopKey)
+  return own && id === `${OWN_PREFIX}${own.key}` ? own : undefined
+}
+
 /**
  * Puts a number in the field book: computed here from the inputs as typed, in the units that go with
  * them. 400 with an error for each input that cannot be used.
@@ -68,12 +85,13 @@ export async function putInFieldBook(
   key: string | undefined,
 ): Promise<FieldBookEntry> {
   const build = await findOwnBuild(access)
-  const calculator = findCalculator(entry.calculator)
+  const revisionId = access.enrolment?.revisionId ?? 0
+  const calculator = await findWhich(entry, revisionId)
   if (!calculator) {
     throw invalid([{ field: 'calculator', message: 'There is no such calculator.' }])
   }
-  await checkPlace(entry, access.enrolment?.revisionId ?? 0)
-  const outputs = compute(calculator, entry)
+  await checkPlace(entry, revisionId)
+  const outputs = await compute(calculator, entry)
   const route = `POST builds/${build.id}/field-book-entries`
   const { response } = await answerOnce({ userId, route, key, payload: entry }, async (tx) => {
     const { lessonKey, stopKey, atMs, inputs } = entry
@@ -83,7 +101,7 @@ export async function putInFieldBook(
         lessonKey,
         stopKey,
         atMs,
-        calculator: calculator.id,
+        calculator: entry.calculator,
         calculatorVersion: calculator.version,
         inputs,
         outputs,

@@ -1,7 +1,9 @@
-import type { BenchStage, Snag } from '../../shared/contracts/benchCourses'
-import { findExerciseProblems } from '../../shared/grading'
+import type { BenchStage, BenchStop, Snag } from '../../shared/contracts/benchCourses'
+import type { Exercise } from '../../shared/contracts/exercises'
+import type { ExerciseProblem } from '../../shared/grading'
 import type { Executor } from '../db/client'
 import { listStopsOf } from '../exercises/benchStops.service'
+import { judgeExercise } from '../exercises/ownCalculatorTasks.service'
 import { listLessonMedia, type LessonMedia } from '../media/lessonMedia.service'
 import type { LessonRow, RevisionRow } from './access.queries'
 import { listLessons } from './benchLessons.queries'
@@ -13,6 +15,8 @@ import { listStages } from './stages.queries'
 export interface FullLesson extends LessonToCheck {
   row: LessonRow
   media: LessonMedia
+  /** What is wrong with the exercises of its stops. */
+  problems: Map<Exercise, ExerciseProblem[]>
 }
 
 /** These lessons with their videos, captions, kit checks and stops. */
@@ -25,6 +29,7 @@ export async function loadLessons(
   const media = await listLessonMedia(courseId, rows, on)
   const kits = await listKits(ids, on)
   const stops = await listStopsOf(ids, on)
+  const problems = await judgeAll([...stops.values()].flat())
   return rows.map((row) => {
     const own = media.get(row.id) ?? { video: null, refused: null, captions: [] }
     return {
@@ -39,13 +44,20 @@ export async function loadLessons(
       video: own.video,
       captions: own.captions,
       stops: stops.get(row.id) ?? [],
+      problems,
     }
   })
 }
 
+async function judgeAll(stops: BenchStop[]): Promise<FullLesson['problems']> {
+  const exercises = stops.flatMap(({ exercise }) => (exercise ? [exercise] : []))
+  const judged = exercises.map(async (one) => [one, await judgeExercise(one)] as const)
+  return new Map(await Promise.all(judged))
+}
+
 /** What is left to mend in one lesson. */
 export const checkLesson = (lesson: FullLesson): Snag[] =>
-  findLessonSnags(lesson, findExerciseProblems)
+  findLessonSnags(lesson, (exercise) => lesson.problems.get(exercise) ?? [])
 
 /** A revision's stages and lessons as rows of the bench, and its snag list. */
 export async function loadOutline(
@@ -54,6 +66,7 @@ export async function loadOutline(
 ): Promise<{ stages: BenchStage[]; snags: Snag[] }> {
   const stages = await listStages(revision.id, on)
   const lessons = await loadLessons(revision.courseId, await listLessons(revision.id, on), on)
+  const problems = new Map(lessons.flatMap((lesson) => [...lesson.problems]))
   const inStage = (stageId: number) => lessons.filter(({ row }) => row.stageId === stageId)
   const snags = findSnags(
     {
@@ -61,7 +74,7 @@ export async function loadOutline(
       tools: revision.tools,
       stages: stages.map(({ id, title }) => ({ title, lessons: inStage(id) })),
     },
-    findExerciseProblems,
+    (exercise) => problems.get(exercise) ?? [],
   )
   const countMusts = (lessonId: number) =>
     snags.filter(({ weight, place }) => weight === 'must' && place.lessonId === lessonId).length

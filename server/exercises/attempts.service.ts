@@ -6,7 +6,7 @@ import type {
   UnitSystem,
   Verdict,
 } from '../../shared/contracts/exercises'
-import { gradeExercise, shownAnswer, toLearnerExercise } from '../../shared/grading'
+import { toLearnerExercise } from '../../shared/grading'
 import type { Actor } from '../../shared/contracts/policies'
 import { answerOnce, checkKey } from '../accounts/idempotency.service'
 import { recordKeeper, type LessonAccess } from '../courses/access.service'
@@ -18,6 +18,7 @@ import {
 } from '../progress/lessonProgress.service'
 import { findLastAttempt, findStopExercise, insertAttempt } from './attempts.queries'
 import { checkAnswer } from './checkAnswer'
+import { gradeAnswer, showAnswer } from './ownCalculatorTasks.service'
 import { answerRemembered, openRemembered, type RememberedStops } from './rememberedStops'
 import { openStopState, sessionNameOf } from './stopStates.service'
 import { lockStopState, updateStopState } from './stopStates.queries'
@@ -49,13 +50,13 @@ async function findExercise({ access, stopKey }: AtStop) {
 }
 
 /** The right answer is in it only once the stop is solved or its tries are used. */
-function present(
+async function present(
   stopKey: string,
   exercise: Exercise,
   { seed, triesUsed, solved }: Standing,
   last: LastAttempt | null,
   units: UnitSystem,
-): StopState {
+): Promise<StopState> {
   const isOutOfTries = exercise.tries !== null && triesUsed >= exercise.tries
   return {
     stopKey,
@@ -64,7 +65,8 @@ function present(
     exercise: toLearnerExercise(exercise, seed, triesUsed, solved, units),
     lastAnswer: last?.answer ?? null,
     lastVerdict: last?.verdict ?? null,
-    shownAnswer: solved || isOutOfTries ? shownAnswer(exercise, seed, last?.answer ?? null) : null,
+    shownAnswer:
+      solved || isOutOfTries ? await showAnswer(exercise, seed, last?.answer ?? null) : null,
   }
 }
 
@@ -115,10 +117,10 @@ export async function answerStop(
   const { exerciseId, exercise } = await findExercise(at)
   checkAnswer(exercise, answer)
   const units = answer.kind === 'calculator' ? answer.units : unitsOf(at)
-  const grade = (before: Standing, costsTry = true) => {
-    const verdict = gradeExercise(exercise, answer, before.seed)
+  const grade = async (before: Standing, costsTry = true) => {
+    const verdict = await gradeAnswer(exercise, answer, before.seed)
     const after = costsTry ? moveOn(before, verdict, exercise.tries) : before
-    const state = present(at.stopKey, exercise, after, { answer, verdict }, units)
+    const state = await present(at.stopKey, exercise, after, { answer, verdict }, units)
     return { after, graded: { verdict, state } }
   }
   const userId = recordKeeper(at.access, at.actor)
@@ -134,7 +136,7 @@ export async function answerStop(
   const route = `POST stops/${person.courseId}/${person.lessonKey}/${at.stopKey}/attempts`
   const { response } = await answerOnce({ userId, route, key, payload: answer }, async (tx) => {
     const row = await lockStopState(person, tx)
-    const { after, graded } = grade({ ...row, solved: row.solvedAt !== null })
+    const { after, graded } = await grade({ ...row, solved: row.solvedAt !== null })
     const { verdict } = graded
     await insertAttempt(
       {

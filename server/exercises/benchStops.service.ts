@@ -7,6 +7,7 @@ import { makeStableKey } from '../courses/stableKeys.service'
 import type { Executor, Transaction } from '../db/client'
 import { isDuplicate } from '../db/transaction'
 import { conflict, invalid, notFound } from '../errors'
+import { attachOwn } from './ownCalculatorAttaching.service'
 import {
   deleteExercise,
   deleteStop,
@@ -103,13 +104,15 @@ function checkQuestionKeys(exercise: Exercise) {
 
 async function changeExercise(
   stop: { id: number; name: string },
+  courseId: number,
   exercise: Exercise | null | undefined,
   tx: Transaction,
 ) {
   if (exercise === undefined) return
   if (exercise === null) return deleteExercise(stop.id, tx)
   checkQuestionKeys(exercise)
-  await saveExercise(stop.id, exercise, makeStableKey(stop.name), tx)
+  const whole = await attachOwn(exercise, courseId, tx)
+  await saveExercise(stop.id, whole, makeStableKey(stop.name), tx)
 }
 
 /** Changes a stop or its exercise; 409 with the stop as it is now when someone else was first. */
@@ -118,14 +121,14 @@ export const changeStop = (
   revisionId: number,
   { version, exercise, ...values }: ChangeStop,
 ): Promise<BenchStop> => {
-  const save = changeDraft(revisionId, async (tx) => {
+  const save = changeDraft(revisionId, async (tx, { courseId }) => {
     const stop = await findStop(stopId, tx)
     if (!stop) throw notFound('stop')
     if (stop.version !== version) throw staleVersion('stop')
     const atMs = values.atMs ?? stop.atMs
     if (atMs !== stop.atMs) await checkMoment(stop.lessonId, atMs, tx)
     await onFreeMoment(atMs, updateStop(stopId, { ...values, version: version + 1 }, tx))
-    await changeExercise(stop, exercise, tx)
+    await changeExercise(stop, courseId, exercise, tx)
     return describeStop(stopId, tx)
   })
   return withCurrent(save, () => describeStop(stopId))

@@ -1,11 +1,11 @@
-import { findCalculator } from '../../shared/calculators'
 import type { Answer, Exercise } from '../../shared/contracts/exercises'
+import { faceOf } from '../../shared/grading'
 import { invalid } from '../errors'
 
 const namesIn = (exercise: Exercise): string[] =>
   exercise.kind === 'quiz'
     ? exercise.questions.map(({ key }) => key)
-    : (findCalculator(exercise.definition.calculator)?.inputs ?? []).map(({ name }) => name)
+    : (faceOf(exercise.definition)?.inputs ?? []).map(({ name }) => name)
 
 /** 400 for an answer of the other kind of exercise, or to something that the exercise does not ask. */
 export function checkAnswer(exercise: Exercise, answer: Answer) {

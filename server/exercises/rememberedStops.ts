@@ -27,15 +27,18 @@ export function openRemembered(stops: RememberedStops, name: string): Remembered
 }
 
 /** Grades against what the session remembers; the last key once more costs no further try. */
-export function answerRemembered<T>(
+export async function answerRemembered<T>(
   stops: RememberedStops,
   name: string,
   key: string | undefined,
-  grade: (before: RememberedStop, costsTry: boolean) => { after: RememberedStop; graded: T },
-): T {
+  grade: (
+    before: RememberedStop,
+    costsTry: boolean,
+  ) => Promise<{ after: RememberedStop; graded: T }>,
+): Promise<T> {
   const before = openRemembered(stops, name)
   const isRepeated = key !== undefined && before.answeredKey === key
-  const { after, graded } = grade(before, !isRepeated)
+  const { after, graded } = await grade(before, !isRepeated)
   stops[name] = { ...after, ...(key === undefined ? {} : { answeredKey: key }) }
   return graded
 }

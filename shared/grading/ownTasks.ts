@@ -1,7 +1,11 @@
 import type { CalculatorRun } from '../calculators/index'
 import { runCalculator } from '../calculators/index'
 import type { Answer, Exercise, UnitSystem, Verdict } from '../contracts/exercises'
-import type { OwnCalculatorDefinition, OwnCheck } from '../contracts/ownCalculators'
+import {
+  OWN_PREFIX,
+  type OwnCalculatorDefinition,
+  type OwnCheck,
+} from '../contracts/ownCalculators'
 import { buildOwnCalculator, checkOwnCalculator, type BuildableCalculator } from '../ownCalculators'
 import type { ExerciseProblem } from './grader'
 import { findExerciseProblems, gradeExercise, shownAnswer } from './index'
@@ -49,6 +53,64 @@ export function performOwnTask(task: OwnTask): OwnTasks[OwnTaskName]['found'] {
     case 'show':
       return shownAnswer(task.given.exercise, task.given.seed, task.given.answer)
   }
+}
+
+const warmUpRounds = 8
+
+/** Does every task with a small calculator until it goes fast, so that the first real one is not held up; gives what is wrong with it: nothing. */
+export function warmUpOwnTasks(): ExerciseProblem[] {
+  const own = { key: 'across', version: 1, definition: warmUpDefinition }
+  const exercise: Exercise = {
+    kind: 'calculator',
+    prompt: 'How long is it across?',
+    tries: 1,
+    definition: {
+      calculator: `${OWN_PREFIX}across`,
+      own,
+      inputs: { side: { mode: 'ranged', min: 1, max: 9, step: 0.1 } },
+      asked: 'across',
+      tolerance: { kind: 'percent', value: 1 },
+      hints: [],
+      slips: [],
+    },
+  }
+  const answer: Answer = { kind: 'calculator', inputs: {}, answer: '3 m', units: 'imperial' }
+  const problems: ExerciseProblem[] = []
+  for (let seed = 0; seed < warmUpRounds; seed++) {
+    performOwnTask({ name: 'grade', given: { exercise, answer, seed } })
+    performOwnTask({ name: 'show', given: { exercise, seed, answer: null } })
+    performOwnTask({ name: 'check', given: { definition: warmUpDefinition } })
+    problems.push(...findExerciseProblems(exercise))
+  }
+  return problems
+}
+
+const warmUpDefinition: OwnCalculatorDefinition = {
+  title: 'Across',
+  question: 'How long is it across?',
+  help: '',
+  inputs: [
+    {
+      name: 'side',
+      label: 'Side',
+      quantity: 'length',
+      help: '',
+      min: 0.1,
+      max: 100,
+      initial: { metric: '', imperial: '' },
+    },
+  ],
+  outputs: [
+    { name: 'across', label: 'Across', quantity: 'length', expression: 'sqrt(2 * side^2) + 0 m' },
+    { name: 'boards', label: 'Boards', quantity: 'count', expression: 'ceil(across / (140 mm))' },
+  ],
+  cautions: [],
+  sources: [{ title: 'Geometry', kind: 'published' }],
+  examples: [
+    { inputs: { side: '3 m' }, expected: { across: '4.243 m', boards: '31' } },
+    { inputs: { side: '1 m' }, expected: { across: '1.414 m', boards: '11' } },
+  ],
+  slips: [],
 }
 
 const anySource = { key: 'own', version: 1 }

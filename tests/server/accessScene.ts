@@ -8,6 +8,7 @@ import { videos } from '../../server/db/schema'
 import { mediaStorage } from '../../server/media/mediaStorage'
 import type { Response } from 'supertest'
 import type { Agent, TestApp } from '../support/app'
+import { createOwnCalculator } from './exercises/ownCalculatorScene'
 import {
   addHelper,
   createInstructor,
@@ -78,6 +79,7 @@ export async function createAccessScene(app: TestApp) {
   const thread = (await send(asking, path, { markdown: 'Like porridge.' })).body
 
   const owner = await app.asUser({ id: course.ownerId })
+  const own = await createOwnCalculator(course.id)
   const upload = await owner.post('/api/uploads').set(uploadHeaders(lesson.id)).expect(201)
   return {
     course,
@@ -92,6 +94,7 @@ export async function createAccessScene(app: TestApp) {
       stageId: stage.id,
       lessonId: lesson.id,
       stopId: stop.id,
+      ownKey: own.key,
       questionId: question.id,
       answerId: thread.answers?.[0]?.id ?? thread.id,
       uploadId: String(upload.headers['location']).split('/').at(-1) ?? '',

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { performOwnTask } from '../../../shared/grading/ownTasks'
+import { performOwnTask, warmUpOwnTasks } from '../../../shared/grading/ownTasks'
 import { barrows, barrowsWithFormula } from '../ownCalculators/definitions'
 
 describe('performOwnTask', () => {
@@ -17,6 +17,10 @@ describe('performOwnTask', () => {
     expect(performOwnTask({ name: 'check', given: { definition } })).toMatchObject({
       problems: [{ path: 'outputs.3.expression' }],
     })
+  })
+
+  it('can be warmed up, with a calculator that has no problems itself', () => {
+    expect(warmUpOwnTasks().filter(({ blocking }) => blocking)).toEqual([])
   })
 
   it('gives only what can be sent from a worker', () => {
