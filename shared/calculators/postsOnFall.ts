@@ -5,7 +5,7 @@ import { lengthsOf } from './postsOnFallLengths'
 import { postsOnFallSlips } from './postsOnFallSlips'
 import { postsOnFallCautions, postsOnFallSources } from './postsOnFallSources'
 import { postsOnFallSteps } from './postsOnFallSteps'
-import { listOf, numberOf, wordOf } from './values'
+import { listOf, numberOf } from './values'
 import { formatQuantity } from '../units/format'
 
 /** A post that is shorter or longer than this is a mistake in the numbers. */
@@ -38,8 +38,7 @@ function compute(values: Values, system: UnitSystem): Values {
       `One post would be ${show(longest)} long: too tall for a garden build. Take less pitch or a lower top.`,
     )
   }
-  const ends = { longest, shortest, difference: longest - shortest }
-  return wordOf(values, 'every') === 'yes' ? { lengths, ...ends } : ends
+  return { lengths, longest, shortest, difference: longest - shortest }
 }
 
 /**
@@ -111,16 +110,6 @@ export const postsOnFall: Calculator = {
         { value: 'against', label: 'the other way' },
       ],
     },
-    {
-      name: 'every',
-      label: 'Length of every post',
-      quantity: 'choice',
-      initial: { metric: 'yes', imperial: 'yes' },
-      choices: [
-        { value: 'yes', label: 'Yes, list them' },
-        { value: 'no', label: 'No, longest and shortest only' },
-      ],
-    },
   ],
   outputs: [
     { name: 'lengths', label: 'Posts, in order', quantity: 'length', isList: true },
@@ -140,8 +129,12 @@ export const postsOnFall: Calculator = {
       positions: '50 mm; 550 mm; 1050 mm',
       topHeight: '1480 mm',
       roofPitch: '5 deg',
-      every: 'no',
     },
-    outputs: { longest: 1.47663, shortest: 1.40914, difference: 0.0674887 },
+    outputs: {
+      lengths: [1.47663, 1.44288, 1.40914],
+      longest: 1.47663,
+      shortest: 1.40914,
+      difference: 0.0674887,
+    },
   },
 }

@@ -41,9 +41,8 @@ function endSteps(
   ]
 }
 
-/** The row of all lengths, where it is wanted. */
+/** The row of all lengths. */
 function listStep(values: Values, outputs: Values, system: UnitSystem): Step[] {
-  if (outputs['lengths'] === undefined) return []
   const write = (metres: number) => stepWriter(system).length(metres)
   return [
     {

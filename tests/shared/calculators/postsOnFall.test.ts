@@ -90,10 +90,6 @@ describe('posts-on-fall', () => {
       ),
     )
   })
-
-  it('leaves the row out where only the ends are wanted', () => {
-    expect(compute(ID, { ...sound, every: 'no' })).not.toHaveProperty('lengths')
-  })
 })
 
 describe('posts-on-fall refuses', () => {
