@@ -20,6 +20,7 @@ import { slab } from './slab'
 import { snow } from './snow'
 import { spacing } from './spacing'
 import { square } from './square'
+import { stairs } from './stairs'
 import { taper } from './taper'
 
 /** Every calculator there is; a new one is one file and one line here. */
@@ -46,6 +47,7 @@ export const calculators: readonly Calculator[] = [
   spacing,
   postsOnFall,
   angleCut,
+  stairs,
 ]
 
 /** The calculator of this id. */

@@ -10,6 +10,7 @@ import pitchRafter from './pitch-rafter.json'
 import safety from './safety.json'
 import snowLoad from './snow-load.json'
 import squaring from './squaring.json'
+import stairs from './stairs.json'
 
 /** One check value from outside the project, in the words and units of its source. */
 export interface ReferenceCase {
@@ -37,6 +38,7 @@ const files = {
   squaring,
   postFooting,
   concreteBatch,
+  stairs,
 } as const
 
 /** Every case whose id matches; a pattern that matches none is an error, so that no table runs empty. */

@@ -1,3 +1,4 @@
+import { drawStairsPicture } from './stairsPicture'
 import { drawAngleCutPicture } from './angleCutPicture'
 import { drawPostsOnFallPicture } from './postsOnFallSheet'
 import { drawSpacingPicture } from './spacingPicture'
@@ -74,6 +75,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   spacing: drawSpacingPicture,
   'posts-on-fall': drawPostsOnFallPicture,
   'angle-cut': drawAngleCutPicture,
+  stairs: drawStairsPicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

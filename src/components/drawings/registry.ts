@@ -32,6 +32,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   spacing: async () => (await import('./spacingSheet')).drawSpacingSheet,
   'posts-on-fall': async () => (await import('./postsOnFallSheet')).drawPostsOnFallSheet,
   'angle-cut': async () => (await import('./angleCutSheet')).drawAngleCutSheet,
+  stairs: async () => (await import('./stairsSheet')).drawStairsSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */
