@@ -132,7 +132,9 @@ describe.each(calculators.map((calculator) => [calculator.id, calculator] as con
         name: field.name,
         figure: figureOf(field, run.outputs[field.name] ?? run.values[field.name], system),
       }))
+      const askable = calculator.outputs.filter(({ isList }) => !isList).map(({ name }) => name)
       for (const { name, figure } of figures.slice(calculator.inputs.length)) {
+        if (!askable.includes(name)) continue
         if (figures.some((other) => other.figure === figure && other.name !== name)) continue
         for (const size of sizes) {
           const sheet = draw({ size, system, ...run, asked: name })
