@@ -1,4 +1,4 @@
-import { findCalculator, runCalculator, showOutput } from '../../../shared/calculators'
+import { runCalculator, showOutput } from '../../../shared/calculators'
 import type {
   Answer,
   Exercise,
@@ -6,7 +6,7 @@ import type {
   QuizQuestion,
   UnitSystem,
 } from '../../../shared/contracts/exercises'
-import { drawInputs, shownAnswer } from '../../../shared/grading'
+import { calculatorOf as findCalculatorOf, drawInputs, shownAnswer } from '../../../shared/grading'
 import type { WrongSeed } from './shapes'
 
 type CalculatorExercise = Extract<Exercise, { kind: 'calculator' }>
@@ -19,7 +19,7 @@ export function seedOf(...words: string[]): number {
 }
 
 function calculatorOf({ definition }: CalculatorExercise) {
-  const calculator = findCalculator(definition.calculator)
+  const calculator = findCalculatorOf(definition)
   if (!calculator) throw new Error(`the demo names no calculator ${definition.calculator}`)
   return calculator
 }

@@ -7,6 +7,8 @@ import {
   hindsightNotes,
   kitItems,
   lessons,
+  ownCalculators,
+  ownCalculatorVersions,
   stages,
 } from '../schema'
 import { insertedId } from './insertedId'
@@ -56,6 +58,7 @@ export async function insertCourse(
     })),
   ])
   const revisionId = await insertRevision(course, courseId, tx)
+  await insertOwnCalculators(course, { courseId, ownerId, createdAt }, tx)
   const rows = { courseId, revisionId, ownerId, createdAt }
   const inserted = new Map<string, InsertedLesson>()
   for (const [position, stage] of course.stages.entries()) {
@@ -175,6 +178,25 @@ async function insertKit({ kit }: LessonSeed, lessonId: number, tx: Transaction)
     .values(kit.map((item, position) => ({ ...item, lessonId, position })))
     .$returningId()
   return rows.map(({ id }) => id)
+}
+
+async function insertOwnCalculators(
+  { ownCalculators: own = {} }: CourseSeed,
+  { courseId, ownerId, createdAt }: Omit<CourseRows, 'revisionId'>,
+  tx: Transaction,
+) {
+  for (const [key, definition] of Object.entries(own)) {
+    const { title } = definition
+    const calculatorId = await insertedId(
+      tx
+        .insert(ownCalculators)
+        .values({ courseId, key, title, definition, attachable: 1, savedAt: createdAt, createdAt })
+        .$returningId(),
+    )
+    await tx
+      .insert(ownCalculatorVersions)
+      .values({ calculatorId, number: 1, definition, createdById: ownerId, createdAt })
+  }
 }
 
 async function insertHindsight(

@@ -1,6 +1,7 @@
 import type { CoverDrawing, Hazard, StageKind } from '../../../shared/contracts/courses'
 import type { KitItem } from '../../../shared/contracts/lessons'
 import type { Exercise, QuestionAnswer } from '../../../shared/contracts/exercises'
+import type { OwnCalculatorDefinition } from '../../../shared/contracts/ownCalculators'
 import type { Interval } from '../../../shared/contracts/progress'
 import type { PersonKey } from './people'
 
@@ -85,6 +86,8 @@ export interface CourseSeed {
   /** Null while it is on the bench. */
   issuedOn: string | null
   stages: StageSeed[]
+  /** Its own calculators by their keys, each kept as version 1. */
+  ownCalculators?: Record<string, OwnCalculatorDefinition>
   hindsight: HindsightSeed[]
   questions: QuestionSeed[]
 }

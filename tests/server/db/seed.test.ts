@@ -49,6 +49,8 @@ const filledTables = [
   stops,
   schema.exercises,
   schema.quizQuestions,
+  schema.ownCalculators,
+  schema.ownCalculatorVersions,
   videos,
   captionTracks,
   captionCues,

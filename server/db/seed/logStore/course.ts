@@ -1,6 +1,7 @@
 import { hazards } from '../kit'
 import type { CourseSeed } from '../shapes'
 import { base } from './base'
+import { firewood } from './firewood'
 import { questions } from './fence'
 import { frame } from './frame'
 import { ground } from './ground'
@@ -74,5 +75,6 @@ export const logStore: CourseSeed = {
       on: '2026-08-11T05:58:00Z',
     },
   ],
+  ownCalculators: { 'firewood-it-holds': firewood },
   questions,
 }

@@ -14,6 +14,7 @@ import {
 } from '../exercises'
 import { caution, hazards, kit, onYou, toHand } from '../kit'
 import type { StageSeed } from '../shapes'
+import { firewood } from './firewood'
 
 export const cladding: StageSeed = {
   key: 'cladding',
@@ -208,6 +209,33 @@ export const finish: StageSeed = {
         ),
       ],
       stops: [
+        {
+          key: 'wood-it-holds',
+          name: 'Wood it holds',
+          at: { afterCue: 4 },
+          byTheWay: true,
+          exercise: worked(
+            'The store is 2400 mm long and 900 mm deep inside. Stacked this high, how much is wood and not air?',
+            3,
+            {
+              calculator: 'own:firewood-it-holds',
+              own: { key: 'firewood-it-holds', version: 1, definition: firewood },
+              inputs: {
+                inside_length: fixed('2400 mm'),
+                depth: fixed('900 mm'),
+                stack_height: ranged(0.8, 1.2, 0.05),
+                air: own('35 %'),
+              },
+              asked: 'solid',
+              tolerance: withinPercent(2),
+              hints: [
+                'The stack first: all three sides in metres or feet.',
+                'If 35 parts in 100 are air, how many are wood?',
+              ],
+              slips: ['air-kept', 'only-the-air', 'air-added'],
+            },
+          ),
+        },
         {
           key: 'which-ends',
           name: 'Which ends',

@@ -1,6 +1,7 @@
 import { hazards } from '../kit'
 import type { CourseSeed } from '../shapes'
 import { questions } from './fence'
+import { gateWeight } from './gateWeight'
 import { base, cladding, finish } from './stages'
 
 export const picketFence: CourseSeed = {
@@ -52,5 +53,6 @@ export const picketFence: CourseSeed = {
       on: '2026-11-07T16:40:00Z',
     },
   ],
+  ownCalculators: { 'gate-on-its-hinges': gateWeight },
   questions,
 }

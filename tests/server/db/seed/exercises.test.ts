@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest'
 import { demoCourses } from '../../../../server/db/seed'
 import { rightAnswer, workedOut } from '../../../../server/db/seed/answers'
+import { ownCalculatorDefinitionSchema } from '../../../../shared/contracts/ownCalculators'
 import { findExerciseProblems, gradeExercise } from '../../../../shared/grading'
+import { checkOwnCalculator } from '../../../../shared/ownCalculators'
 
 const issued = demoCourses.filter(({ issuedOn }) => issuedOn !== null)
 const lessonsOf = (list: typeof demoCourses) =>
@@ -14,7 +16,7 @@ const exercisesOf = (list: typeof demoCourses) =>
   )
 
 describe('the exercises of the demo', () => {
-  it('uses all five calculators and all four kinds of questions', () => {
+  it('uses five built-in calculators, one of its own and all four kinds of questions', () => {
     const all = exercisesOf(issued).map(({ exercise }) => exercise)
     const calculators = all.flatMap((one) =>
       one.kind === 'calculator' ? [one.definition.calculator] : [],
@@ -25,11 +27,23 @@ describe('the exercises of the demo', () => {
     expect([...new Set(calculators)].sort()).toEqual([
       'diagonals',
       'mix',
+      'own:firewood-it-holds',
       'pitch',
       'slab',
       'square',
     ])
     expect([...new Set(kinds)].sort()).toEqual(['number', 'order', 'several', 'single'])
+  })
+
+  const own = demoCourses.flatMap(({ ownCalculators = {} }) => Object.entries(ownCalculators))
+  it('has two own calculators', () => {
+    expect(own.map(([key]) => key)).toEqual(['firewood-it-holds', 'gate-on-its-hinges'])
+  })
+  it.each(own)('has nothing to mend in the own calculator %s', (_key, definition) => {
+    const check = checkOwnCalculator(ownCalculatorDefinitionSchema.parse(definition))
+    expect(check.problems).toEqual([])
+    const agreed = check.examples.flatMap((example) => Object.values(example))
+    expect(agreed.every((given) => given?.agrees === true)).toBe(true)
   })
 
   it.each(exercisesOf(issued))('has nothing to mend in the exercise of $place', ({ exercise }) => {
