@@ -1,6 +1,6 @@
 import { computed, shallowRef, watchEffect } from 'vue'
 import type { Calculator } from '../../shared/calculators/calculator'
-import { runCalculator, type CalculatorRun } from '../../shared/calculators'
+import { runCalculator, type CalculatorRun } from '../../shared/calculators/runCalculator'
 import type { UnitSystem } from '../../shared/contracts/exercises'
 import { convertInputs } from '../components/exercises/typedTexts'
 import { useAccountsStore } from '../stores/accounts'

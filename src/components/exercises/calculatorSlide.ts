@@ -1,6 +1,6 @@
 import type { CalculatorInput, QuantityInput } from '../../../shared/calculators/calculator'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
-import { fieldUnit } from '../../../shared/calculators'
+import { fieldUnit } from '../../../shared/calculators/fields'
 import { findUnit } from '../../../shared/units/unit'
 
 /** Where a slider begins and ends, and how far one step of it goes, in SI. */

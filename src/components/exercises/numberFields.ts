@@ -3,7 +3,7 @@ import type {
   CalculatorOutput,
   Quantity,
 } from '../../../shared/calculators/calculator'
-import { fieldUnit, showInput, showOutput } from '../../../shared/calculators'
+import { fieldUnit, showInput, showOutput } from '../../../shared/calculators/fields'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
 import { formatQuantity } from '../../../shared/units/format'
 import { parseQuantity } from '../../../shared/units/parse'

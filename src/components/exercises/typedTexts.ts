@@ -4,7 +4,7 @@ import type {
   CalculatorOutput,
   Quantity,
 } from '../../../shared/calculators/calculator'
-import { convertText, fieldUnit, showOutput } from '../../../shared/calculators'
+import { convertText, fieldUnit, showOutput } from '../../../shared/calculators/fields'
 import type { LearnerQuestion, UnitSystem } from '../../../shared/contracts/exercises'
 import { parseQuantity } from '../../../shared/units/parse'
 
