@@ -10,6 +10,7 @@ import { fixings } from './fixings'
 import { gravel } from './gravel'
 import { joints } from './joints'
 import { lid } from './lid'
+import { lumberSize } from './lumberSize'
 import { mix } from './mix'
 import { pitch } from './pitch'
 import { posthole } from './posthole'
@@ -48,6 +49,7 @@ export const calculators: readonly Calculator[] = [
   postsOnFall,
   angleCut,
   stairs,
+  lumberSize,
 ]
 
 /** The calculator of this id. */

@@ -1,4 +1,5 @@
 import concreteBatch from './concrete-batch.json'
+import lumber from './lumber.json'
 import postFooting from './post-footing.json'
 import controlJoints from './control-joints.json'
 import concreteVolume from './concrete-volume.json'
@@ -39,6 +40,7 @@ const files = {
   postFooting,
   concreteBatch,
   stairs,
+  lumber,
 } as const
 
 /** Every case whose id matches; a pattern that matches none is an error, so that no table runs empty. */

@@ -1,3 +1,4 @@
+import { drawLumberSizePicture } from './lumberSizePicture'
 import { drawStairsPicture } from './stairsPicture'
 import { drawAngleCutPicture } from './angleCutPicture'
 import { drawPostsOnFallPicture } from './postsOnFallSheet'
@@ -76,6 +77,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   'posts-on-fall': drawPostsOnFallPicture,
   'angle-cut': drawAngleCutPicture,
   stairs: drawStairsPicture,
+  'lumber-size': drawLumberSizePicture,
 }
 
 /** Draws the small picture of a calculator, a chalk “?” at the number it answers; undefined where it has none. */

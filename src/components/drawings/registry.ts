@@ -33,6 +33,7 @@ export const CALCULATOR_SHEETS: Readonly<Record<string, () => Promise<DrawCalcul
   'posts-on-fall': async () => (await import('./postsOnFallSheet')).drawPostsOnFallSheet,
   'angle-cut': async () => (await import('./angleCutSheet')).drawAngleCutSheet,
   stairs: async () => (await import('./stairsSheet')).drawStairsSheet,
+  'lumber-size': async () => (await import('./lumberSizeSheet')).drawLumberSizeSheet,
 }
 
 /** Every kind of course drawing; each is fetched when it is first shown. */

@@ -9,7 +9,7 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   {
     title: 'Frame',
     about: 'Posts and slopes',
-    ids: ['pitch', 'spacing', 'posts-on-fall', 'angle-cut', 'stairs'],
+    ids: ['pitch', 'spacing', 'posts-on-fall', 'angle-cut', 'stairs', 'lumber-size'],
   },
   { title: 'Cladding', about: 'Boards', ids: ['taper', 'boards'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid', 'rafter'] },
