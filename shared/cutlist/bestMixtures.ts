@@ -1,5 +1,5 @@
 import { firstFit, shrinkBars } from './firstFit'
-import { fillBest } from './knapsack'
+import { fillWell } from './knapsack'
 import type { Goal, Remainder } from './master'
 import { at, countBars, dot, gatherPlan, type Pattern, type PlanLine } from './patterns'
 import type { PackingProblem } from './sectionProblem'
@@ -47,7 +47,7 @@ function nextMixture(
     at(left, offer) > 0 ? capacity - at(widths, widest) : -1,
   )
   const limits = pieces.map((count, size) => count - (size === widest ? 1 : 0))
-  const fillings = fillBest({ widths, values: widths, limits }, rooms)
+  const fillings = fillWell({ widths, values: widths, limits }, rooms)
   let best: { pattern: Pattern; cost: number; used: number } | null = null
   for (const [offer, room] of rooms.entries()) {
     const filling = fillings[offer]

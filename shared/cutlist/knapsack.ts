@@ -25,10 +25,14 @@ export function fillBest(items: KnapsackItems, capacities: readonly number[]): F
   const bundles = bundleItems(items)
   const cells = bundles.length * Math.max(...capacities)
   if (cells <= smallTable) return fillByTable(items, bundles, capacities)
-  const searched = capacities.map((capacity) => searchFilling(items, capacity))
+  const searched = fillWell(items, capacities)
   const isProved = searched.every(({ value, bound }) => value === bound)
   return isProved || cells > largestTable ? searched : fillByTable(items, bundles, capacities)
 }
+
+/** For each capacity a valuable filling, the best that a short search finds. */
+export const fillWell = (items: KnapsackItems, capacities: readonly number[]): Filling[] =>
+  capacities.map((capacity) => searchFilling(items, capacity))
 
 interface Bundle {
   item: number
@@ -95,10 +99,10 @@ function searchFilling({ widths, values, limits }: KnapsackItems, capacity: numb
   const best: Filling = { counts: [...counts], value: 0, bound: 0 }
   let nodes = 0
   let unseen = 0
-  // Never below the true bound: the quotient is lifted by more than its rounding error.
+  // Never below the true bound, a whole number: the quotient is lifted by more than its rounding error.
   const bring = (depth: number, left: number) => {
     const next = order[depth]
-    return next ? Math.ceil(left * (next.value / next.width) * (1 + 1e-12)) : 0
+    return next ? Math.floor(left * (next.value / next.width) * (1 + 1e-12)) : 0
   }
   const visit = (depth: number, left: number, value: number) => {
     if (value > best.value) {

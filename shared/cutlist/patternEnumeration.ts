@@ -103,5 +103,5 @@ function tableOfRest(sizes: readonly Size[], values: readonly number[], capacity
 function densityOfRest(sizes: readonly Size[], values: readonly number[]): Bring {
   const densities = sizes.map(({ width }, size) => at(values, size) / width)
   const densest = densities.map((_, size) => Math.max(...densities.slice(size)))
-  return (size, left) => Math.ceil(left * (densest[size] ?? 0) * (1 + 1e-12))
+  return (size, left) => Math.floor(left * (densest[size] ?? 0) * (1 + 1e-12))
 }

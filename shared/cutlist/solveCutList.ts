@@ -53,14 +53,12 @@ export function solveCutList(request: CutRequest, tools: CutTools): CutList {
     report(index)
     const share = (ends - Date.now()) / (problems.length - index)
     const deadline = openDeadline(share, tools.isCancelled)
-    solved[index] = solveSection(problem, {
-      deadline,
-      solver: openSolver(deadline),
-      onChange: (better) => {
-        solved[index] = better
-        report(index)
-      },
-    })
+    const onChange = (better: SolvedSection) => {
+      solved[index] = better
+      report(index)
+    }
+    const sectionTools = { deadline, solver: openSolver(deadline), onChange }
+    solved[index] = solveSection(problem, sectionTools, solved[index] ?? null)
   })
   report(problems.length)
   return layOut(

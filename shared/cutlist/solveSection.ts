@@ -55,9 +55,12 @@ export function solveAtOnce(problem: SectionProblem): SolvedSection | null {
   return { problem, plan: proof === 'optimal' ? searchFewerCuts(problem, plan) : plan, proof }
 }
 
-/** Searches for the least cost, then the least bought length at that cost, then fewer different cuts. */
-export function solveSection(problem: SectionProblem, tools: SectionTools): SolvedSection {
-  const start = solveAtOnce(problem)
+/** Searches from a first plan for the least cost, then the least bought length at it, then fewer different cuts. */
+export function solveSection(
+  problem: SectionProblem,
+  tools: SectionTools,
+  start = solveAtOnce(problem),
+): SolvedSection {
   if (start?.proof === 'optimal') return start
   const isOneGoal = isPricedByLength(problem)
   const cheapest = searchGoal(problem, costGoal(problem), start?.plan ?? null, isOneGoal, tools)

@@ -14,17 +14,26 @@ const small: CutRequest = {
   kerfMm: 3,
   endTrimMm: 0,
 }
-/** Bars cut into three with nothing left over: first-fit wastes bars here, and the proof takes a while. */
+/** Prices so near to each other that the proof takes seconds. */
 const hard: CutRequest = {
-  parts: Array.from({ length: 13 }, (_, row) => {
-    const [one, other] = [400 + ((row * 41) % 90), 260 + ((row * 53) % 110)]
-    return [one, other, 1000 - one - other]
-  })
-    .flat()
-    .map((lengthMm) => ({ label: `${lengthMm}`, lengthMm, count: 9, section })),
-  stock: [{ lengthMm: 1000, section }],
-  kerfMm: 0,
-  endTrimMm: 0,
+  parts: [
+    [572, 2],
+    [883, 2],
+    [221, 8],
+    [530, 8],
+    [871, 2],
+    [1181, 7],
+    [2365, 5],
+    [642, 3],
+  ].map(([lengthMm = 0, count = 0]) => ({ label: `${lengthMm}`, lengthMm, count, section })),
+  stock: [
+    { lengthMm: 2400, section, price: 899 },
+    { lengthMm: 3000, section, price: 1149 },
+    { lengthMm: 3600, section, price: 1325 },
+    { lengthMm: 4800, section, price: 1899 },
+  ],
+  kerfMm: 3.2,
+  endTrimMm: 10,
 }
 const piecesOf = ({ parts }: CutRequest) => parts.reduce((sum, { count }) => sum + count, 0)
 
