@@ -1,10 +1,10 @@
-import { Worker } from 'node:worker_threads'
 import { CalculatorInputError } from '../../shared/calculators/calculator'
 import { checkCutRequest } from '../../shared/cutlist/checkCutRequest'
 import type { CutList } from '../../shared/cutlist/cutList'
 import type { CutRequest } from '../../shared/cutlist/cutRequest'
 import type { CutProgress } from '../../shared/cutlist/solveCutList'
 import { invalid } from '../errors'
+import { startThread } from '../workerThreads'
 import type { CutNews, CutWork } from './cutlist.worker'
 
 /** How long to search, and whom to tell. */
@@ -55,18 +55,13 @@ export async function findCutList(request: CutRequest, search: CutSearch = {}): 
   }
 }
 
-/** Starts the thread: the file that the build writes beside the server or, run from source, the one beside this. */
-function startThread(work: CutWork): Worker {
-  const file = import.meta.url.endsWith('.ts') ? 'cutlist.source.mjs' : 'cutlist.worker.js'
-  return new Worker(new URL(file, import.meta.url), { workerData: work })
-}
-
 async function searchInThread(
   request: CutRequest,
   { millisecondsLimit = usualMilliseconds, onProgress, signal }: CutSearch,
 ): Promise<CutList> {
   const cancelled = new Int32Array(new SharedArrayBuffer(4))
-  const worker = startThread({ request, millisecondsLimit, cancelled })
+  const work: CutWork = { request, millisecondsLimit, cancelled }
+  const worker = startThread('builds', 'cutlist', { workerData: work })
   let best: CutList | null = null
   let ending: NodeJS.Timeout | undefined
   const endWithin = (milliseconds: number) => {
