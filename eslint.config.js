@@ -304,7 +304,8 @@ export default defineConfig(
           patterns: [
             {
               regex: '^(?!\\.{1,2}/|zod(/|$)|mathjs(/|$)|fraction\\.js$|highs$|webvtt-parser$)',
-              message: 'Shared code imports shared code, zod, pure maths libraries and the caption parser.',
+              message:
+                'Shared code imports shared code, zod, pure maths libraries and the caption parser.',
             },
           ],
         },

@@ -35,7 +35,8 @@ export const notAllowed = (detail = 'This is not yours to do.') =>
   new AppError(403, 'not-allowed', detail)
 
 /** 404: nothing there, or nothing that may be seen. */
-export const notFound = (what: string) => new AppError(404, 'not-found', `There is no such ${what}.`)
+export const notFound = (what: string) =>
+  new AppError(404, 'not-found', `There is no such ${what}.`)
 
 /** 409: somebody changed it meanwhile, or its state forbids it. */
 export const conflict = (code: string, detail: string, current?: unknown) =>

@@ -75,9 +75,7 @@ for (const { name, page } of firstPages) {
   held.push(report(`${name}, styles`, await weigh(files, '.css'), limits.styles))
   const all = filesOf(chunksWithLater(manifest, [entry, page], common))
   const later = [...all].filter((file) => !files.has(file))
-  console.log(
-    `  what may follow          ${((await weigh(later, '.js')) / kB).toFixed(1)} kB gzip`,
-  )
+  console.log(`  what may follow          ${((await weigh(later, '.js')) / kB).toFixed(1)} kB gzip`)
 }
 const first = filesOf(
   chunksOf(manifest, [entry, ...firstPages.slice(0, 1).map(({ page }) => page)]),

@@ -80,7 +80,9 @@ export const courseRevisions = mysqlTable(
     notCovered: varchar('not_covered', { length: 1000 }).notNull().default(''),
     changeNote: varchar('change_note', { length: 300 }).notNull().default(''),
     version: int('version', { unsigned: true }).notNull().default(1),
-    savedAt: moment('saved_at').notNull().default(sql`CURRENT_TIMESTAMP(3)`),
+    savedAt: moment('saved_at')
+      .notNull()
+      .default(sql`CURRENT_TIMESTAMP(3)`),
     issuedAt: moment('issued_at'),
     issuedById: reference('issued_by_id').references(() => users.id, { onDelete: 'set null' }),
     /** The course's id while a draft, else null: a course has one draft. */

@@ -77,7 +77,10 @@ export const answers = mysqlTable(
       .references(() => questions.id, { onDelete: 'cascade' }),
     ...post,
   },
-  (t) => [index('answers_question').on(t.questionId, t.id), unique('answers_of_question').on(t.questionId, t.id)],
+  (t) => [
+    index('answers_question').on(t.questionId, t.id),
+    unique('answers_of_question').on(t.questionId, t.id),
+  ],
 )
 
 /** One visible change in a room, for readers who lost the line. */
@@ -90,7 +93,14 @@ export const fenceEvents = mysqlTable(
       .references(() => fenceRooms.id, { onDelete: 'cascade' }),
     number: int('number', { unsigned: true }).notNull(),
     questionId: reference('question_id').notNull(),
-    kind: mysqlEnum('kind', ['asked', 'answered', 'edited', 'deleted', 'settled', 'unsettled']).notNull(),
+    kind: mysqlEnum('kind', [
+      'asked',
+      'answered',
+      'edited',
+      'deleted',
+      'settled',
+      'unsettled',
+    ]).notNull(),
     createdAt: createdAt(),
   },
   (t) => [

@@ -59,7 +59,9 @@ export const captionTracks = mysqlTable(
     /** What stood before the first cue: header text, NOTE and STYLE blocks. */
     preamble: text('preamble').notNull(),
     version: int('version', { unsigned: true }).notNull().default(1),
-    savedAt: moment('saved_at').notNull().default(sql`CURRENT_TIMESTAMP(3)`),
+    savedAt: moment('saved_at')
+      .notNull()
+      .default(sql`CURRENT_TIMESTAMP(3)`),
   },
   (t) => [unique('caption_tracks_language').on(t.videoId, t.language)],
 )
@@ -91,9 +93,13 @@ export const jobs = mysqlTable(
     id: id(),
     kind: varchar('kind', { length: 40 }).notNull(),
     payload: json('payload').$type<Record<string, unknown>>().notNull(),
-    state: mysqlEnum('state', ['waiting', 'running', 'done', 'failed']).notNull().default('waiting'),
+    state: mysqlEnum('state', ['waiting', 'running', 'done', 'failed'])
+      .notNull()
+      .default('waiting'),
     attempts: int('attempts', { unsigned: true }).notNull().default(0),
-    runAfter: moment('run_after').notNull().default(sql`CURRENT_TIMESTAMP(3)`),
+    runAfter: moment('run_after')
+      .notNull()
+      .default(sql`CURRENT_TIMESTAMP(3)`),
     /** Set while running and renewed; a job whose beat is old is taken up again. */
     beatAt: moment('beat_at'),
     failure: varchar('failure', { length: 500 }),

@@ -1,5 +1,14 @@
 import { sql } from 'drizzle-orm'
-import { check, foreignKey, index, int, json, mysqlEnum, mysqlTable, unique } from 'drizzle-orm/mysql-core'
+import {
+  check,
+  foreignKey,
+  index,
+  int,
+  json,
+  mysqlEnum,
+  mysqlTable,
+  unique,
+} from 'drizzle-orm/mysql-core'
 import type { Interval } from '../../../shared/contracts/progress'
 import { users } from './accounts'
 import { createdAt, id, moment, reference, stableKey } from './columns'
@@ -38,9 +47,13 @@ export const lessonProgress = mysqlTable(
     intervals: json('intervals').$type<Interval[]>().notNull(),
     watchedMs: int('watched_ms', { unsigned: true }).notNull().default(0),
     positionMs: int('position_ms', { unsigned: true }).notNull().default(0),
-    state: mysqlEnum('state', ['not-started', 'under-way', 'done']).notNull().default('not-started'),
+    state: mysqlEnum('state', ['not-started', 'under-way', 'done'])
+      .notNull()
+      .default('not-started'),
     doneAt: moment('done_at'),
-    updatedAt: moment('updated_at').notNull().default(sql`CURRENT_TIMESTAMP(3)`),
+    updatedAt: moment('updated_at')
+      .notNull()
+      .default(sql`CURRENT_TIMESTAMP(3)`),
   },
   (t) => [
     unique('lesson_progress_person_once').on(t.userId, t.courseId, t.lessonKey),

@@ -17,5 +17,4 @@ const letters = Array.from('abcdefghijklmnopqrstuvwxyz')
 
 /** The first letter that no row has as its id. */
 export const freeId = (rows: readonly { id: string }[]): string =>
-  letters.find((letter) => !rows.some(({ id }) => id === letter)) ??
-  crypto.randomUUID().slice(0, 8)
+  letters.find((letter) => !rows.some(({ id }) => id === letter)) ?? crypto.randomUUID().slice(0, 8)
