@@ -5,15 +5,20 @@ import {
   shortestMm,
   widestKerfMm,
   type CutLimits,
-  type CutPart,
   type CutRequest,
   type CutStock,
 } from './cutRequest'
+import { formatQuantity } from '../units/format'
 import { stepsDown, stepsUp } from './lengthSteps'
 
 const refuse = (input: string, sentence: string): never => {
   throw new CalculatorInputError(input, sentence)
 }
+/** To the hundredth of a millimetre, or to 1/16 in. */
+const sayLength = (lengthMm: number, { units = 'metric' }: Pick<CutRequest, 'units'>) =>
+  units === 'metric'
+    ? `${Math.round(lengthMm * 100) / 100} mm`
+    : formatQuantity(lengthMm / 1000, 'length', units)
 const isBetween = (number: number, least: number, most: number) =>
   Number.isFinite(number) && number >= least && number <= most
 const isWhole = (number: number, least: number, most: number) =>
@@ -25,23 +30,29 @@ const isWhole = (number: number, least: number, most: number) =>
  */
 export function checkCutRequest(request: CutRequest, limits: CutLimits = homeLimits): void {
   checkSaw(request)
-  checkParts(request.parts, limits)
-  checkStock(request.stock, limits)
+  checkParts(request, limits)
+  checkStock(request, limits)
   for (const section of new Set(request.parts.map((part) => part.section))) {
     checkSection(request, section)
   }
 }
 
-function checkSaw({ kerfMm, endTrimMm }: CutRequest) {
+function checkSaw(request: CutRequest) {
+  const { kerfMm, endTrimMm } = request
+  const say = (lengthMm: number) => sayLength(lengthMm, request)
   if (!isBetween(kerfMm, 0, widestKerfMm)) {
-    refuse('kerf', `The saw cut is ${kerfMm} mm wide; give a width from 0 to ${widestKerfMm} mm.`)
+    const range = `from 0 to ${say(widestKerfMm)}`
+    refuse('kerf', `The saw cut is ${say(kerfMm)} wide; give a width ${range}.`)
   }
   if (!isBetween(endTrimMm, 0, longestMm)) {
-    refuse('endTrim', `The end trim is ${endTrimMm} mm; give a length from 0 to ${longestMm} mm.`)
+    const range = `from 0 to ${say(longestMm)}`
+    refuse('endTrim', `The end trim is ${say(endTrimMm)}; give a length ${range}.`)
   }
 }
 
-function checkParts(parts: readonly CutPart[], limits: CutLimits) {
+function checkParts(request: CutRequest, limits: CutLimits) {
+  const { parts } = request
+  const say = (lengthMm: number) => sayLength(lengthMm, request)
   if (parts.length === 0) refuse('parts', 'List at least one part to cut.')
   if (parts.length > limits.parts) {
     refuse(
@@ -51,8 +62,8 @@ function checkParts(parts: readonly CutPart[], limits: CutLimits) {
   }
   for (const { label, lengthMm, count } of parts) {
     if (!isBetween(lengthMm, shortestMm, longestMm)) {
-      const range = `from ${shortestMm} mm to ${longestMm / 1000} m`
-      refuse('parts', `“${label}” is ${lengthMm} mm long; give a length ${range}.`)
+      const range = `from ${say(shortestMm)} to ${say(longestMm)}`
+      refuse('parts', `“${label}” is ${say(lengthMm)} long; give a length ${range}.`)
     }
     if (!isWhole(count, 1, limits.pieces)) {
       const range = `from 1 to ${limits.pieces}`
@@ -65,7 +76,9 @@ function checkParts(parts: readonly CutPart[], limits: CutLimits) {
   }
 }
 
-function checkStock(stock: readonly CutStock[], limits: CutLimits) {
+function checkStock(request: CutRequest, limits: CutLimits) {
+  const { stock } = request
+  const say = (lengthMm: number) => sayLength(lengthMm, request)
   if (stock.length === 0) refuse('stock', 'List at least one length that you can buy or have.')
   if (stock.length > limits.stockLengths) {
     const most = `a list holds up to ${limits.stockLengths}`
@@ -73,17 +86,17 @@ function checkStock(stock: readonly CutStock[], limits: CutLimits) {
   }
   for (const { lengthMm, price, available } of stock) {
     if (!isBetween(lengthMm, shortestMm, longestMm)) {
-      const range = `from ${shortestMm} mm to ${longestMm / 1000} m`
-      refuse('stock', `A stock length is ${lengthMm} mm; give a length ${range}.`)
+      const range = `from ${say(shortestMm)} to ${say(longestMm)}`
+      refuse('stock', `A stock length is ${say(lengthMm)}; give a length ${range}.`)
     }
     if (price !== undefined && !isWhole(price, 0, 10_000_000)) {
       refuse(
         'stock',
-        `The ${lengthMm} mm bar costs ${price}; give a whole number of cents or pence.`,
+        `The ${say(lengthMm)} bar costs ${price}; give a whole number of cents or pence.`,
       )
     }
     if (available !== undefined && !isWhole(available, 0, 1_000_000)) {
-      refuse('stock', `There are ${available} of the ${lengthMm} mm bars; give a whole number.`)
+      refuse('stock', `There are ${available} of the ${say(lengthMm)} bars; give a whole number.`)
     }
   }
 }
@@ -119,7 +132,7 @@ function checkLengths(request: CutRequest, section: string, stock: readonly CutS
   const trim = request.endTrimMm > 0 ? ' once its end is trimmed' : ''
   refuse(
     'parts',
-    `“${part.label}” is ${part.lengthMm} mm long, longer than every ${section} bar${trim}; ` +
+    `“${part.label}” is ${sayLength(part.lengthMm, request)} long, longer than every ${section} bar${trim}; ` +
       'add a longer stock length, or join two pieces where the plan allows it.',
   )
 }

@@ -61,7 +61,8 @@ export function generateColumns(
     if (!remainder) {
       const dual = proveBound(problem, goal, prices, fillings)
       if (dual) keepBound(search, dual)
-      const isClose = search.nextCost(answer.cost - closeEnough) <= search.bound
+      const isClose =
+        answer.cost <= search.mostCost && search.nextCost(answer.cost - closeEnough) <= search.bound
       if (isSettled(search) || isClose) return answer.columns
     }
     const paying = fillings.flatMap(({ counts, value }, offer) =>

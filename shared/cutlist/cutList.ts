@@ -1,4 +1,4 @@
-import type { CutRequest, CutStock } from './cutRequest'
+import type { CutPart, CutRequest, CutStock } from './cutRequest'
 import { stepsDown, stepsToMm, stepsUp } from './lengthSteps'
 import { at, measurePlan, type Plan, type PlanLine } from './patterns'
 import type { SectionProblem } from './sectionProblem'
@@ -49,6 +49,7 @@ export interface SolvedSection {
   proof: CutProof
 }
 
+const lengthOfAll = ({ lengthMm, count }: CutPart) => lengthMm * count
 const sum = (numbers: readonly number[]) => numbers.reduce((total, number) => total + number, 0)
 
 /** Writes plans of sizes and offers as bars with labelled pieces. */
@@ -61,7 +62,8 @@ export function layOut(request: CutRequest, solved: readonly SolvedSection[]): C
     bars,
     count: bars.length,
     boughtMm,
-    wasteMm: boughtMm - sum(request.parts.map(({ lengthMm, count }) => lengthMm * count)),
+    // To whole steps, which takes away what is left of adding up inches.
+    wasteMm: stepsToMm(stepsDown(boughtMm - sum(request.parts.map(lengthOfAll)))),
     cost: costs.includes(null) ? null : sum(costs.map((cost) => cost ?? 0)),
     differentCuts: sum(sections.map(({ differentCuts }) => differentCuts)),
     sections,

@@ -1,3 +1,5 @@
+import type { UnitSystem } from '../contracts/exercises'
+
 /** Pieces of one length that the build needs. */
 export interface CutPart {
   label: string
@@ -25,6 +27,8 @@ export interface CutRequest {
   kerfMm: number
   /** Taken off each bar before the first piece, for a split or dirty end; this cut's own dust is part of it. */
   endTrimMm: number
+  /** The units in which a refusal names lengths; millimetres if not said. */
+  units?: UnitSystem
 }
 
 /** How large a list may be. */

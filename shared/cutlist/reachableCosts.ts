@@ -23,14 +23,15 @@ export function reachableCosts(problem: PackingProblem, costs: readonly number[]
   const paid = bars.filter(({ cost, room }) => cost > 0 && room > 0)
   /** The most room that bars of exactly this cost have; −1 where no bars cost it. */
   const rooms = [free.reduce((sum, { room, available }) => sum + room * available, 0)]
+  const roomFor = (cost: number) => {
+    for (let next = rooms.length; next <= cost; next++) rooms.push(mostRoom(rooms, paid, next))
+    return rooms[cost] ?? -1
+  }
   return (from) => {
-    for (let cost = 0; cost < longestTable; cost++) {
-      const room = rooms[cost] ?? mostRoom(rooms, paid, cost)
-      rooms[cost] = room
-      if (cost >= from && room >= needed) return cost
-      if (paid.length === 0) return Infinity
-    }
-    return Math.max(from, longestTable)
+    const least = Math.max(0, Math.ceil(from))
+    if (paid.length === 0) return least === 0 && roomFor(0) >= needed ? 0 : Infinity
+    for (let cost = least; cost < longestTable; cost++) if (roomFor(cost) >= needed) return cost
+    return Math.max(least, longestTable)
   }
 }
 

@@ -71,7 +71,7 @@ function proveByFlow(search: Search) {
   if (!flow) return
   const limits = { target: search.bound, mostNodes: longSearchNodes }
   const answer = search.solver.solveInteger(flow.program, limits)
-  if (answer.isInfeasible) return raiseBound(search, Infinity)
+  if (answer.isInfeasible && !search.plan) return raiseBound(search, Infinity)
   if (answer.columns) offerPlan(search, flow.readPlan(answer.columns))
   raiseBound(search, Math.min(search.cost, Math.ceil(answer.bound - solverSlack)))
 }

@@ -25,11 +25,10 @@ const startCutWorker = (): CutWorker =>
   new Worker(new URL('./cutlist.worker.ts', import.meta.url), { type: 'module' })
 
 /** A copy that can be posted, whatever Vue has wrapped the original in. */
-const plain = ({ parts, stock, kerfMm, endTrimMm }: CutRequest): CutRequest => ({
-  parts: parts.map((part) => ({ ...part })),
-  stock: stock.map((one) => ({ ...one })),
-  kerfMm,
-  endTrimMm,
+const plain = (request: CutRequest): CutRequest => ({
+  ...request,
+  parts: request.parts.map((part) => ({ ...part })),
+  stock: request.stock.map((one) => ({ ...one })),
 })
 
 /**

@@ -42,7 +42,7 @@ describe('checkCutRequest', () => {
       'a part shorter than a saw holds',
       { parts: [{ ...part, lengthMm: 4.9 }] },
       'parts',
-      /from 5 mm to 30 m/,
+      /from 5 mm to 30000 mm/,
     ],
     ['no stock', { stock: [] }, 'stock', /at least one length/],
     ['13 stock lengths', { stock: times(13, bar) }, 'stock', /13 stock lengths.*up to 12/],
@@ -54,7 +54,7 @@ describe('checkCutRequest', () => {
       'stock',
       /-1 of the 3600 mm bars/,
     ],
-    ['a wide saw', { kerfMm: 26 }, 'kerf', /26 mm wide.*0 to 25 mm/],
+    ['a wide saw', { kerfMm: 26 }, 'kerf', /26 mm wide.*from 0 to 25 mm/],
     ['a trim below zero', { endTrimMm: -1 }, 'endTrim', /-1 mm/],
     [
       'a section without stock',
@@ -93,5 +93,12 @@ describe('checkCutRequest', () => {
     expect(check).toThrow(
       expect.objectContaining({ input, message: expect.stringMatching(sentence) }),
     )
+  })
+
+  it('names lengths in feet and inches to whoever gave them so', () => {
+    const parts = [{ ...part, lengthMm: 97 * 25.4 }]
+    const stock = [{ ...bar, lengthMm: 96 * 25.4 }]
+    const check = () => checkCutRequest({ ...fine, parts, stock, units: 'imperial' })
+    expect(check).toThrow(/“rail” is 8' 1" long, longer than every/)
   })
 })
