@@ -5,16 +5,15 @@ import { boardsSlips } from './boardsSlips'
 import { boardsSteps } from './boardsSteps'
 import { numberOf, wordOf } from './values'
 
-function compute(values: Values): Values {
-  const { marks, ...laid } = layBoards({
+const compute = (values: Values): Values => ({
+  ...layBoards({
     opening: numberOf(values, 'opening'),
     boardWidth: numberOf(values, 'boardWidth'),
     gap: numberOf(values, 'gap'),
     isEven: wordOf(values, 'mode') === 'even-gap',
     endGaps: wordOf(values, 'ends') === 'gap' ? 2 : 0,
-  })
-  return wordOf(values, 'stick') === 'yes' ? { ...laid, marks } : laid
-}
+  }),
+})
 
 /**
  * Boards in an opening, metres. Fixed gap: count = opening ÷ (board + gap), up; last rip = opening − (count − 1) × (board + gap),
@@ -57,12 +56,12 @@ export const boards: Calculator = {
       boardWidth: '95 mm',
       gap: '60 mm',
       mode: 'even-gap',
-      stick: 'no',
     },
     outputs: {
       count: 6,
       gap: 0.046,
       lastRip: 0.095,
+      marks: [0, 0.141, 0.282, 0.423, 0.564, 0.705],
     },
   },
 }

@@ -49,16 +49,6 @@ export const boardsInputs: CalculatorInput[] = [
       { value: 'gap', label: 'A gap at both ends' },
     ],
   },
-  {
-    name: 'stick',
-    label: 'Marks for a stick',
-    quantity: 'choice',
-    initial: { metric: 'yes', imperial: 'yes' },
-    choices: [
-      { value: 'yes', label: 'Yes, list them' },
-      { value: 'no', label: 'No' },
-    ],
-  },
 ]
 
 /** The outputs of `boards`. */

@@ -23,23 +23,20 @@ export function boardsSteps(values: Values, outputs: Values, system: UnitSystem)
       result: writer.length(numberOf(outputs, 'lastRip')),
       output: 'lastRip',
     },
-    ...markStep(outputs, writer, `${writer.length(numberOf(values, 'boardWidth'))} + ${gap}`),
+    markStep(outputs, writer, `${writer.length(numberOf(values, 'boardWidth'))} + ${gap}`),
   ]
 }
 
-/** How the marks follow from each other; nothing where no stick is wanted. */
-function markStep(outputs: Values, writer: Writer, step: string): Step[] {
-  if (outputs['marks'] === undefined) return []
+/** How the marks follow from each other. */
+function markStep(outputs: Values, writer: Writer, step: string): Step {
   const marks = listOf(outputs, 'marks').map((mark) => writer.length(mark))
-  return [
-    {
-      label: 'Marks on the stick, near edge of each board',
-      formula: 'from the first mark on, a board and a gap each time',
-      numbers: `${marks[0] ?? ''}, then ${step} each`,
-      result: marks.join('; '),
-      output: 'marks',
-    },
-  ]
+  return {
+    label: 'Marks on the stick, near edge of each board',
+    formula: 'from the first mark on, a board and a gap each time',
+    numbers: `${marks[0] ?? ''}, then ${step} each`,
+    result: marks.join('; '),
+    output: 'marks',
+  }
 }
 
 type Writer = ReturnType<typeof stepWriter>

@@ -3,7 +3,7 @@ import { CalculatorInputError } from './calculator'
 import { spacingInputs, spacingOutputs } from './spacingFields'
 import { spacingSlips } from './spacingSlips'
 import { spacingSteps } from './spacingSteps'
-import { numberOf, wordOf } from './values'
+import { numberOf } from './values'
 import { clean, roundUp } from '../units/number'
 
 /** More members than one run of a garden has. */
@@ -37,10 +37,12 @@ function compute(values: Values): Values {
   checkSpacing(run, most, width)
   const spaces = Math.max(1, roundUp((run - width) / most))
   const centres = (run - width) / spaces
-  const spaced = { count: spaces + 1, centres, clear: clean(centres - width) }
-  if (wordOf(values, 'stick') === 'no') return spaced
-  const marks = Array.from({ length: spaces + 1 }, (_, index) => clean(index * centres))
-  return { ...spaced, marks }
+  return {
+    count: spaces + 1,
+    centres,
+    clear: clean(centres - width),
+    marks: Array.from({ length: spaces + 1 }, (_, index) => clean(index * centres)),
+  }
 }
 
 /**
@@ -81,7 +83,12 @@ export const spacing: Calculator = {
     },
   ],
   example: {
-    inputs: { run: '3600 mm', maxCentres: '400 mm', memberWidth: '45 mm', stick: 'no' },
-    outputs: { count: 10, centres: 0.395, clear: 0.35 },
+    inputs: { run: '3600 mm', maxCentres: '400 mm', memberWidth: '45 mm' },
+    outputs: {
+      count: 10,
+      centres: 0.395,
+      clear: 0.35,
+      marks: [0, 0.395, 0.79, 1.185, 1.58, 1.975, 2.37, 2.765, 3.16, 3.555],
+    },
   },
 }

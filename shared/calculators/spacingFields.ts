@@ -29,16 +29,6 @@ export const spacingInputs: CalculatorInput[] = [
     min: 0.005,
     max: 0.5,
   },
-  {
-    name: 'stick',
-    label: 'Marks for a stick',
-    quantity: 'choice',
-    initial: { metric: 'yes', imperial: 'yes' },
-    choices: [
-      { value: 'yes', label: 'Yes, list them' },
-      { value: 'no', label: 'No' },
-    ],
-  },
 ]
 
 /** The outputs of `spacing`. */

@@ -9,7 +9,8 @@ export function spacingSteps(values: Values, outputs: Values, system: UnitSystem
   const run = numberOf(values, 'run') - numberOf(values, 'memberWidth')
   const spaces = writer.number(numberOf(outputs, 'count') - 1)
   const centres = writer.length(numberOf(outputs, 'centres'))
-  const steps: Step[] = [
+  const marks = listOf(outputs, 'marks').map((mark) => writer.length(mark))
+  return [
     {
       label: 'First to last, centre to centre',
       formula: 'run − one width',
@@ -37,11 +38,6 @@ export function spacingSteps(values: Values, outputs: Values, system: UnitSystem
       result: writer.length(numberOf(outputs, 'clear')),
       output: 'clear',
     },
-  ]
-  if (outputs['marks'] === undefined) return steps
-  const marks = listOf(outputs, 'marks').map((mark) => writer.length(mark))
-  return [
-    ...steps,
     {
       label: 'Marks, near edge of each',
       formula: 'from the outside of the first, the centres each time',

@@ -108,8 +108,7 @@ function captions(
   const lines: [string, string][] = [
     [`${count.text} ${boards.count === 1 ? 'board' : 'boards'}`, count.chalk ? 'askt' : 'vtitle'],
   ]
-  if (!input.asked && input.outputs?.marks)
-    lines.push([describeMarks(drawing, boards.starts, input.system), 'tx'])
+  if (!input.asked) lines.push([describeMarks(drawing, boards.starts, input.system), 'tx'])
   if (boards.last < boards.width / 3 && !input.asked)
     lines.push(['the last board is a thin strip: share it', 'slipt'])
   if (row.breakAt !== undefined) lines.push(['row cut short', 'vsub'])

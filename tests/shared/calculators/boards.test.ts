@@ -34,10 +34,6 @@ describe('boards with a fixed gap', () => {
     expect(millimetres(outputs['gap'])).toBeCloseTo(gap, 9)
   })
 
-  it('lists no marks where none are wanted', () => {
-    expect(lay(2450, 145, 5, { stick: 'no' })['marks']).toBeUndefined()
-  })
-
   it('takes two gaps off where it starts and ends with a gap', () => {
     const outputs = lay(1010, 100, 5, { ends: 'gap' })
     expect(outputs['count']).toBe(10)
@@ -142,7 +138,6 @@ describe('the slips of boards', () => {
     gap: 0.005,
     mode: 'fixed-gap',
     ends: 'board',
-    stick: 'yes',
   }
   const wrong = (id: string, more: Record<string, string> = {}) => {
     const { mode, ends } = { ...values, ...more }

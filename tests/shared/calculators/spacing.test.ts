@@ -6,8 +6,8 @@ import { compute, refuse } from './compute'
 
 // Common practice without a published table; checked against mathjs and by walking the run again.
 const mm = (value: number) => `${String(value)} mm`
-const place = (run: number, most: number, width: number, stick = 'yes') =>
-  compute('spacing', { run: mm(run), maxCentres: mm(most), memberWidth: mm(width), stick })
+const place = (run: number, most: number, width: number) =>
+  compute('spacing', { run: mm(run), maxCentres: mm(most), memberWidth: mm(width) })
 const millimetres = (value: unknown) => Number(value) * 1000
 
 describe('spacing takes the least that keeps the centres', () => {
@@ -34,9 +34,8 @@ describe('spacing takes the least that keeps the centres', () => {
     expect(Number(outputs['clear']) / 0.0254).toBeCloseTo(14.5, 9)
   })
 
-  it('marks the near edge of each from one end, and lists none where none are wanted', () => {
+  it('marks the near edge of each from one end', () => {
     expect(place(1045, 500, 45)['marks']).toEqual([0, 0.5, 1])
-    expect(place(1045, 500, 45, 'no')['marks']).toBeUndefined()
   })
 })
 
@@ -75,7 +74,7 @@ describe('spacing refuses', () => {
 })
 
 describe('the slips of spacing', () => {
-  const values = { run: 3.6, maxCentres: 0.4, memberWidth: 0.045, stick: 'yes' }
+  const values = { run: 3.6, maxCentres: 0.4, memberWidth: 0.045 }
   it.each([
     ['spaces-for-members', '9'],
     ['by-the-clear-space', '9'],

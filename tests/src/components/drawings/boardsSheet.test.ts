@@ -5,7 +5,7 @@ import { drawBoardsSheet } from '../../../../src/components/drawings/boardsSheet
 import { expectLabelsApart } from './anyNumbers'
 
 function sheetFor(changed: Record<string, number | string> = {}, asked?: string) {
-  const choices = { mode: 'fixed-gap', ends: 'board', stick: 'yes' }
+  const choices = { mode: 'fixed-gap', ends: 'board' }
   const usual = { opening: 2.45, boardWidth: 0.145, gap: 0.005, ...choices }
   const values = { ...usual, ...changed }
   const run = computeValues(boards, values, 'metric')

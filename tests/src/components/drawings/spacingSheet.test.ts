@@ -5,7 +5,7 @@ import { drawSpacingSheet } from '../../../../src/components/drawings/spacingShe
 import { expectLabelsApart } from './anyNumbers'
 
 function sheetFor(changed: Record<string, number> = {}, asked?: string) {
-  const values = { run: 3.6, maxCentres: 0.4, memberWidth: 0.045, stick: 'yes', ...changed }
+  const values = { run: 3.6, maxCentres: 0.4, memberWidth: 0.045, ...changed }
   const run = computeValues(spacing, values, 'metric')
   if (!run.ok) throw new Error('the spacing is refused')
   return drawSpacingSheet({ size: 'wide', system: 'metric', values, outputs: run.outputs, asked })
