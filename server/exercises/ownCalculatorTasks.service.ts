@@ -13,6 +13,7 @@ import {
   type ExerciseProblem,
 } from '../../shared/grading'
 import type { OwnTaskName, OwnTasks } from '../../shared/grading/ownTasks'
+import { endedCheck, endedRun, tookTooLong } from '../../shared/ownCalculators/ended'
 import { unreadVerdict } from '../../shared/grading/verdict'
 import { logger } from '../logger'
 import { TaskEnded, TaskThread } from '../taskThread'
@@ -28,9 +29,6 @@ const thread = new TaskThread(
     }),
   { computeMs: 50, clockMs: 1000 },
 )
-
-/** One sentence for whoever meets a calculator that was ended. */
-const tookTooLong = 'The formula took too long to work out.'
 
 /** What the task gives, or `instead` when it was ended. */
 async function perform<Name extends OwnTaskName>(
@@ -83,19 +81,7 @@ export async function judgeExercise(exercise: Exercise): Promise<ExerciseProblem
 
 /** What is wrong with a definition; it can be attached when nothing is. */
 export const checkDefinition = (definition: OwnCalculatorDefinition): Promise<OwnCheck> =>
-  perform('check', { definition }, (sentence) => ({
-    problems: [
-      {
-        path: 'outputs',
-        output: null,
-        column: null,
-        length: 0,
-        message: sentence,
-        wayOut: 'Shorten the formulas.',
-      },
-    ],
-    examples: [],
-  }))
+  perform('check', { definition }, endedCheck)
 
 /** Works a calculator out for what a person typed: a built-in one here, an own one aside. */
 export async function workCalculator(
@@ -105,9 +91,5 @@ export async function workCalculator(
 ): Promise<CalculatorRun> {
   if ('compute' in which) return runCalculator(which, texts, system)
   const { definition } = which
-  return perform('run', { definition, texts, system }, (sentence) => ({
-    ok: false,
-    values: {},
-    errors: { [definition.inputs[0]?.name ?? 'answer']: sentence },
-  }))
+  return perform('run', { definition, texts, system }, (sentence) => endedRun(definition, sentence))
 }

@@ -1,10 +1,12 @@
 import { computed, watch, type Ref } from 'vue'
-import { fieldUnit, findCalculator, hideAnswer, runCalculator } from '../../shared/calculators'
+import { fieldUnit } from '../../shared/calculators/fields'
+import { hideAnswer } from '../../shared/calculators/runCalculator'
 import type { LearnerExercise, StopState } from '../../shared/contracts/exercises'
 import { convertAnswer, convertInputs, withoutUnit } from '../components/exercises/typedTexts'
 import { useAccountsStore } from '../stores/accounts'
 import { useExercisesStore } from '../stores/exercises'
 import { useLessonsStore } from '../stores/lessons'
+import { findFace, useCalculatorRun } from './useCalculatorRun'
 import { useKeptDraft } from './useKeptDraft'
 
 type CalculatorPart = Extract<LearnerExercise, { kind: 'calculator' }>
@@ -18,7 +20,7 @@ export function useWorkedExercise(state: Ref<StopState>, exercise: Ref<Calculato
   const accounts = useAccountsStore()
   const lessons = useLessonsStore()
   const exercises = useExercisesStore()
-  const calculator = computed(() => findCalculator(exercise.value.calculator))
+  const calculator = computed(() => findFace(exercise.value))
   const asked = computed(() =>
     calculator.value?.outputs.find((output) => output.name === exercise.value.asked),
   )
@@ -74,8 +76,10 @@ export function useWorkedExercise(state: Ref<StopState>, exercise: Ref<Calculato
     draft.value = { ...shown, ...changed, units: accounts.units, isSent: false }
   }
 
-  const run = computed(() =>
-    calculator.value ? runCalculator(calculator.value, texts.value, accounts.units) : null,
+  const { run } = useCalculatorRun(
+    () => exercise.value,
+    () => texts.value,
+    () => accounts.units,
   )
   const errors = computed(() => (run.value && !run.value.ok ? run.value.errors : {}))
   const isShown = computed(() => state.value.solved || state.value.shownAnswer !== null)

@@ -16,7 +16,7 @@ export function withoutUnit(text: string, unit: string): string {
 
 /** Inputs typed in one system as they read in another; in the same one they stay as they were typed. */
 export function convertInputs(
-  calculator: Calculator,
+  calculator: Pick<Calculator, 'inputs'>,
   texts: Record<string, string>,
   from: UnitSystem,
   to: UnitSystem,
