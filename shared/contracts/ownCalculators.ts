@@ -1,22 +1,10 @@
 import { z } from 'zod'
+import { ownCalculatorLimits } from '../ownCalculators/limits'
 
-/** Hard bounds of an instructor's own calculator; what is longer was pasted by mistake, or meant to break something. */
-export const ownCalculatorLimits = {
-  inputs: 12,
-  outputs: 8,
-  slips: 10,
-  examples: 8,
-  cautions: 6,
-  sources: 6,
-  nameCharacters: 24,
-  expressionCharacters: 300,
-  fewestExamples: 2,
-} as const
+export { OWN_PREFIX, ownCalculatorLimits } from '../ownCalculators/limits'
 
 /** Names the calculator in every course; with `own:` before it, it is the calculator's id in an exercise. */
 export const ownCalculatorKeySchema = z.string().regex(/^[a-z0-9-]{3,36}$/)
-/** What the id of an own calculator begins with. */
-export const OWN_PREFIX = 'own:'
 
 /** What an own calculator can measure; a rise in 12 is said as a ratio or an angle. */
 export const ownQuantitySchema = z.enum([

@@ -1,16 +1,16 @@
 import { fieldUnit, showOutput } from '../calculators/fields'
 import { readInputs } from '../calculators/readInputs'
-import {
-  ownCalculatorLimits,
-  type OwnCalculatorDefinition,
-  type OwnCheck,
-  type OwnExample,
-  type OwnOutput,
-  type OwnProblem,
+import type {
+  OwnCalculatorDefinition,
+  OwnCheck,
+  OwnExample,
+  OwnOutput,
+  OwnProblem,
 } from '../contracts/ownCalculators'
 import { parseQuantity } from '../units/parse'
 import { buildOwnCalculator, toScope } from './build'
 import { scaleOf, workOut, type ReadFormula } from './formulas'
+import { ownCalculatorLimits } from './limits'
 import { formulaProblem, problemAt } from './problems'
 
 /** A worked example is written to three or four figures: what it says agrees within half a per cent. */

@@ -1,5 +1,6 @@
 import type { Calculator } from '../calculators/calculator'
-import { OWN_PREFIX, type OwnCalculatorSheet } from '../contracts/ownCalculators'
+import type { OwnCalculatorSheet } from '../contracts/ownCalculators'
+import { OWN_PREFIX } from './limits'
 
 /** What is seen of a calculator, built in or own: its words and fields, not its computation. */
 export type CalculatorFace = Omit<Calculator, 'compute' | 'steps' | 'slips' | 'example'>

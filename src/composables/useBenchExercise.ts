@@ -1,6 +1,5 @@
 import { computed, ref, watchEffect, type Ref } from 'vue'
 import type { Exercise } from '../../shared/contracts/exercises'
-import { findExerciseProblems } from '../../shared/grading'
 import {
   findUnfinished,
   readDraft,
@@ -9,6 +8,7 @@ import {
 import { notesOf } from '../components/exercises/fieldNotes'
 import { newCalculatorExercise, newQuizExercise } from '../components/exercises/newExercises'
 import { useAccountsStore } from '../stores/accounts'
+import { useExerciseProblems } from './useExerciseProblems'
 import { useKeptDraft } from './useKeptDraft'
 
 /** The exercise of a stop while it is written: what is wrong with it, where, and the other kind it was before. */
@@ -28,6 +28,9 @@ export function useBenchExercise(
     const now = exercise.value && readDraft(exercise.value)
     if (now || !exercise.value || exercise.value.kind !== read.value?.kind) read.value = now
   })
+  const found = useExerciseProblems(() =>
+    exercise.value && readDraft(exercise.value) !== null ? read.value : null,
+  )
   const problems = computed(() => {
     if (!exercise.value) return []
     const unfinished = findUnfinished(exercise.value).map(({ field, message }) => ({
@@ -35,12 +38,10 @@ export function useBenchExercise(
       message,
       blocking: true,
     }))
-    const isWhole = readDraft(exercise.value) !== null
-    const found = isWhole && read.value ? findExerciseProblems(read.value) : []
     /** A row that is unfinished says so itself. */
     const isSaid = (path: string) =>
       unfinished.some((note) => note.path === path || note.path === `${path}.text`)
-    return [...unfinished, ...found.filter(({ path }) => !isSaid(path))]
+    return [...unfinished, ...found.value.filter(({ path }) => !isSaid(path))]
   })
   const notes = computed(() => {
     const own = notesOf(problems.value)

@@ -5,7 +5,7 @@ import type { UnitSystem } from '../../shared/contracts/exercises'
 import { OWN_PREFIX, type LearnerOwnSnapshot } from '../../shared/contracts/ownCalculators'
 import { describeOwnCalculator, type CalculatorFace } from '../../shared/ownCalculators/face'
 import { endedRun, tookTooLong } from '../../shared/ownCalculators/ended'
-import { performAside } from './formulaThread'
+import { performAside } from './ownCalculatorAside'
 
 /** A built-in calculator by its id, or an own one with what an exercise or the bench holds of it. */
 export interface WhichCalculator {

@@ -1,5 +1,7 @@
-import type { FormulaQuestion } from '../../../src/composables/ownCalculator.worker'
-import { performFormulaTask } from '../../../shared/ownCalculators/tasks'
+import type { AsideQuestion } from '../../../src/composables/asideThread'
+import type { Exercise } from '../../../shared/contracts/exercises'
+import { findExerciseProblems } from '../../../shared/grading'
+import { performFormulaTask, type FormulaTask } from '../../../shared/ownCalculators/tasks'
 
 type Listener = (event: { data: unknown }) => void
 
@@ -24,12 +26,13 @@ export class FakeWorker {
   addEventListener(kind: string, listener: Listener) {
     ;(this.listeners[kind] ??= []).push(listener)
   }
-  postMessage({ id, task }: FormulaQuestion) {
+  postMessage({ id, task }: AsideQuestion<FormulaTask | Exercise>) {
     this.tasks.push(structuredClone(task))
     const isSpinning = FakeWorker.behaviour === 'spins'
     setTimeout(() => {
       this.tell({ taken: id })
-      if (!isSpinning) this.tell({ done: id, found: performFormulaTask(task) })
+      const found = () => ('name' in task ? performFormulaTask(task) : findExerciseProblems(task))
+      if (!isSpinning) this.tell({ done: id, found: found() })
     })
   }
   terminate() {

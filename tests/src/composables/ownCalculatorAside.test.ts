@@ -1,15 +1,17 @@
 import { beforeEach, describe, expect, it, vi } from 'vitest'
 import { reactive } from 'vue'
-import type * as thread from '../../../src/composables/formulaThread'
+import type * as aside from '../../../src/composables/ownCalculatorAside'
+import type { Exercise } from '../../../shared/contracts/exercises'
 import { barrows, barrowsWithFormula } from '../../shared/ownCalculators/definitions'
 import { FakeWorker } from './fakeWorker'
 
-let performAside: typeof thread.performAside
+let performAside: typeof aside.performAside
+let judgeAside: typeof aside.judgeAside
 beforeEach(async () => {
   FakeWorker.reset()
   vi.stubGlobal('Worker', FakeWorker)
   vi.resetModules()
-  ;({ performAside } = await import('../../../src/composables/formulaThread'))
+  ;({ performAside, judgeAside } = await import('../../../src/composables/ownCalculatorAside'))
 })
 
 const [{ inputs: texts } = { inputs: {} }] = barrows().examples
@@ -48,5 +50,40 @@ describe('performAside', () => {
     expect(ends.map(({ status }) => status)).toEqual(['rejected', 'rejected'])
     FakeWorker.behaviour = 'works'
     expect((await run()).ok).toBe(true)
+  })
+})
+
+describe('judgeAside', () => {
+  const exercise: Exercise = {
+    kind: 'calculator',
+    prompt: 'How much?',
+    tries: null,
+    definition: {
+      calculator: 'own:barrows',
+      own: {
+        key: 'barrows',
+        version: 1,
+        definition: barrowsWithFormula('loose', 'trench * lenght'),
+      },
+      inputs: {},
+      asked: 'loose',
+      tolerance: { kind: 'percent', value: 1 },
+      hints: [],
+      slips: [],
+    },
+  }
+
+  it('finds what is wrong with an exercise in a worker of its own', async () => {
+    await run()
+    const found = await judgeAside(exercise)
+    expect(found[0]).toMatchObject({ path: 'definition.own.definition.outputs.1.expression' })
+    expect(FakeWorker.opened).toHaveLength(2)
+  })
+
+  it('takes being too slow for one of the reasons', async () => {
+    FakeWorker.behaviour = 'spins'
+    expect(await judgeAside(exercise)).toMatchObject([
+      { blocking: true, message: expect.stringContaining('took too long') as string },
+    ])
   })
 })
