@@ -107,6 +107,7 @@ export const gateWeight: OwnCalculatorDefinition = {
       name: 'timber',
       label: 'Timber in the gate',
       quantity: 'volume',
+      unit: { metric: 'L', imperial: 'ft³' },
       expression:
         'pickets * picket_width * picket_thickness * picket_length + frame_length * rail_width * rail_thickness',
     },
@@ -155,7 +156,7 @@ export const gateWeight: OwnCalculatorDefinition = {
         rail_thickness: '45 mm',
         density: '550 kg/m³',
       },
-      expected: { timber: '0.02333 m³', weight: '12.83 kg', pull: '99.7 N' },
+      expected: { timber: '23.3 L', weight: '12.83 kg', pull: '99.7 N' },
     },
     {
       inputs: {
