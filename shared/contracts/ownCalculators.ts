@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { ownCalculatorLimits } from '../ownCalculators/limits'
 
-export { OWN_PREFIX, ownCalculatorLimits } from '../ownCalculators/limits'
+export { OWN_PREFIX } from '../ownCalculators/limits'
 
 /** Names the calculator in every course; with `own:` before it, it is the calculator's id in an exercise. */
 export const ownCalculatorKeySchema = z.string().regex(/^[a-z0-9-]{3,36}$/)

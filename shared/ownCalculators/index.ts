@@ -1,3 +1,3 @@
-export { buildOwnCalculator, type BuildableCalculator } from './build'
+export { buildOwnCalculator } from './build'
 export { checkOwnCalculator } from './check'
 export { describeOwnCalculator, type CalculatorFace } from './face'
