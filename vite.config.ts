@@ -45,6 +45,33 @@ function serverEntries(): Record<string, string> {
   ])
 }
 
+/**
+ * Small files that most pages share, in two chunks: by themselves they were some thirty requests of half a
+ * kilobyte, each a journey of its own on a phone. What is large, or wanted by few pages, stays apart.
+ */
+const sharedChunks = [
+  {
+    name: 'vendor',
+    priority: 3,
+    test: /node_modules\/(vue|@vue|vue-router|pinia|@vueuse|zod)\//,
+  },
+  {
+    name: 'sheets',
+    priority: 1,
+    test: /src\/components\/(base\/(BasePictogram|pictograms)|courses\/(HazardList|stageNames|sheetWords))|src\/(stores|api)\/courses\.|shared\/contracts\/(courses|builds|pagination)\./,
+  },
+  {
+    name: 'pieces',
+    priority: 2,
+    test: /src\/components\/base\/(BaseButton|BaseLoading|BaseProblem|BaseEmptyState|BaseSelect|BaseCaution|BaseVerdict|BaseSegment|BaseIcon|icons)|src\/composables\/use(Load|Action|Theme)\.|src\/stores\/accounts\.|src\/api\/(client|accounts)\.|shared\/contracts\/(accounts|errors|stableKey|unitSystem)\.|shared\/units\/moment\./,
+  },
+  {
+    name: 'drawing',
+    priority: 1,
+    test: /src\/components\/drawings\/(Drawing|CourseDrawing|drawing|dimensions|figures|notes|marks|materials|lettering|random|stipple|courseSheet|stages|registry)|src\/composables\/useDrawingSize\.|shared\/units\/(format|number|length|unit|slope)\./,
+  },
+]
+
 const serverBuild = {
   target: 'node20',
   sourcemap: true,
@@ -71,7 +98,9 @@ export default defineConfig(({ isSsrBuild }) => ({
     manifest: !isSsrBuild,
     modulePreload: { polyfill: false },
     reportCompressedSize: false,
-    ...(isSsrBuild ? serverBuild : {}),
+    ...(isSsrBuild
+      ? serverBuild
+      : { rolldownOptions: { output: { codeSplitting: { groups: sharedChunks } } } }),
   },
   test: {
     restoreMocks: true,

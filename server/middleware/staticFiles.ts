@@ -1,6 +1,7 @@
 import { existsSync } from 'node:fs'
 import { join } from 'node:path'
 import express, { Router, type RequestHandler, type Response } from 'express'
+import { createPagePreloads } from './pagePreloads'
 
 const encodings = [
   { name: 'br', suffix: '.br' },
@@ -51,8 +52,11 @@ export function staticFiles(folder: string): Router {
 export function clientPage(folder: string): RequestHandler {
   const page = preferCompressed(folder)
   const files = express.static(folder, { index: false, setHeaders: setCaching })
+  const preloads = createPagePreloads(folder)
   return (request, response, next) => {
     if (request.method !== 'GET' && request.method !== 'HEAD') return next()
+    const link = preloads(request.path, request.url.includes('?'))
+    if (link) response.setHeader('Link', link)
     request.url = '/index.html'
     page(request, response, () => void files(request, response, next))
   }

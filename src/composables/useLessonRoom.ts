@@ -1,4 +1,4 @@
-import { computed, nextTick, onMounted, watch, type Ref } from 'vue'
+import { computed, onMounted, watch, type Ref } from 'vue'
 import type { WatchedLesson } from '../../shared/contracts/lessons'
 import { useAccountsStore } from '../stores/accounts'
 import { useExercisesStore } from '../stores/exercises'
@@ -70,8 +70,7 @@ export function useLessonRoom(room: LessonRoom, frame: Ref<HTMLElement | null>) 
   const settleAt = computed(() => cues.value.map((cue) => cue.endMs))
 
   /** The workbench takes the focus, unless somebody is writing; opened from below, it is scrolled to. */
-  async function focusWorkbench() {
-    await nextTick()
+  function focusWorkbench() {
     if (document.activeElement?.matches('input, textarea')) return
     const workbench = document.querySelector<HTMLElement>('#workbench')
     workbench?.focus({ preventScroll: true })
@@ -80,8 +79,7 @@ export function useLessonRoom(room: LessonRoom, frame: Ref<HTMLElement | null>) 
   watch(
     () => open.value?.key,
     (key) => {
-      if (key) void focusWorkbench()
-      else exercises.close()
+      if (!key) exercises.close()
     },
   )
   async function carryOn() {
@@ -90,7 +88,7 @@ export function useLessonRoom(room: LessonRoom, frame: Ref<HTMLElement | null>) 
   }
   function toggle() {
     if (isPlaying.value) player.pause()
-    else if (isHeld.value) void focusWorkbench()
+    else if (isHeld.value) focusWorkbench()
     else void carryOn()
   }
   /** Going elsewhere on the tape leaves the workbench; the stop stays open for later. */
@@ -126,6 +124,6 @@ export function useLessonRoom(room: LessonRoom, frame: Ref<HTMLElement | null>) 
 
   return {
     ...{ player, watching, stops, open, tapeStops, tapeQuestions, settleAt },
-    ...{ start, seek, back, toggle, carryOn, nextStop, stopBefore },
+    ...{ start, seek, back, toggle, carryOn, nextStop, stopBefore, focusWorkbench },
   }
 }
