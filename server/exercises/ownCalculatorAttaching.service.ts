@@ -1,8 +1,13 @@
 import type { Exercise } from '../../shared/contracts/exercises'
-import { OWN_PREFIX } from '../../shared/contracts/ownCalculators'
+import { OWN_PREFIX, type OwnSnapshot } from '../../shared/contracts/ownCalculators'
 import type { Transaction } from '../db/client'
 import { invalid } from '../errors'
-import { findOwnVersion, lockOwnCalculator } from './ownCalculators.queries'
+import {
+  findCalculatorAt,
+  findOwnVersion,
+  listOwnTitles,
+  lockOwnCalculator,
+} from './ownCalculators.queries'
 
 /**
  * An exercise as it is kept: one made of an own calculator holds the version as this course has kept it,
@@ -30,4 +35,20 @@ export async function attachOwn(
     ...exercise,
     definition: { ...exercise.definition, own: { key, version, definition: kept.definition } },
   }
+}
+
+/** The own calculator that a stop of a revision is made of, as it was when it was attached; or null. */
+export async function findOwnAtStop(
+  revisionId: number,
+  lessonKey: string,
+  stopKey: string,
+): Promise<OwnSnapshot | null> {
+  const definition = await findCalculatorAt(revisionId, lessonKey, stopKey)
+  return definition?.own ?? null
+}
+
+/** Titles of a course's own calculators by the ids they have in exercises and field books. */
+export async function nameOwnCalculators(courseId: number): Promise<Map<string, string>> {
+  const titles = await listOwnTitles(courseId)
+  return new Map([...titles].map(([key, title]) => [`${OWN_PREFIX}${key}`, title]))
 }

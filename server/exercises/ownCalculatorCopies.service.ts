@@ -9,12 +9,8 @@ import { answerOnce } from '../accounts/idempotency.service'
 import { notFound } from '../errors'
 import { readCursor } from '../paging'
 import { findOwnCalculator, listCopyable, updateOwnCalculator } from './ownCalculators.queries'
-import {
-  accessOwnCalculators,
-  addToCourse,
-  describeOwnCalculator,
-  keepVersion,
-} from './ownCalculators.service'
+import { accessOwnCalculators, addToCourse, describeOwnCalculator } from './ownCalculators.service'
+import { keepVersion } from './ownCalculatorVersions.service'
 
 /** A page of the own calculators of other courses on whose staff a person is, the newest first. */
 export async function listCopyableFor(

@@ -18,9 +18,9 @@ import {
   createOwnCalculator,
   describeOwnCalculator,
   listOfCourse,
-  listVersions,
   removeOwnCalculator,
 } from './ownCalculators.service'
+import { listVersions } from './ownCalculatorVersions.service'
 
 export const ownCalculatorsRouter = Router()
 

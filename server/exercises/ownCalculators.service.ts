@@ -1,11 +1,8 @@
-import { OWN_PREFIX } from '../../shared/contracts/ownCalculators'
 import type {
   ChangeOwnCalculator,
   CreateOwnCalculator,
   OwnCalculator,
   OwnCalculatorRow,
-  OwnCalculatorVersion,
-  OwnSnapshot,
 } from '../../shared/contracts/ownCalculators'
 import type { Page, PageQuery } from '../../shared/contracts/pagination'
 import { can, type Actor } from '../../shared/contracts/policies'
@@ -21,18 +18,14 @@ import {
   countAttached,
   countOwnCalculators,
   deleteOwnCalculator,
-  findCalculatorAt,
   findOwnCalculator,
   insertOwnCalculator,
-  insertOwnVersion,
   listOwnCalculators,
-  listOwnTitles,
-  listOwnVersions,
   lockOwnCalculator,
   updateOwnCalculator,
-  findOwnVersion,
 } from './ownCalculators.queries'
 import { checkDefinition } from './ownCalculatorTasks.service'
+import { isSameDefinition, keepVersion } from './ownCalculatorVersions.service'
 
 const mostOfCourse = 60
 /** With `own:` before it, a key still fits where the ids of calculators are kept. */
@@ -44,9 +37,8 @@ export const accessOwnCalculators = (courseId: number, actor: Actor | null) =>
 
 type Found = NonNullable<Awaited<ReturnType<typeof findOwnCalculator>>>
 
-const isSame = (a: unknown, b: unknown) => JSON.stringify(a) === JSON.stringify(b)
 const isUnkept = ({ calculator, kept }: Found) =>
-  kept === null || !isSame(calculator.definition, kept)
+  kept === null || !isSameDefinition(calculator.definition, kept)
 const countStops = (attached: Awaited<ReturnType<typeof countAttached>>, key: string) =>
   attached.filter((one) => one.key === key).reduce((sum, { stops }) => sum + stops, 0)
 
@@ -143,21 +135,6 @@ export async function createOwnCalculator(
   return describeOwnCalculator(courseId, response.key, actor)
 }
 
-/** Keeps a definition as the version after the last one, unless it says the same. */
-export async function keepVersion(
-  calculator: { id: number; attachable: number | null },
-  definition: OwnCalculator['definition'],
-  createdById: number | null,
-  tx: Transaction,
-): Promise<number> {
-  const { id, attachable } = calculator
-  const last = attachable === null ? null : await findOwnVersion(id, attachable, tx)
-  if (last && isSame(last.definition, definition)) return last.number
-  const number = (attachable ?? 0) + 1
-  await insertOwnVersion({ calculatorId: id, number, definition, createdById }, tx)
-  return number
-}
-
 /**
  * Saves the draft of an own calculator, and keeps it as a version when that is asked. 409 `stale` with the
  * calculator as it is when someone else was first, 409 `not-attachable` with the check while it has problems.
@@ -203,43 +180,3 @@ export const removeOwnCalculator = (courseId: number, key: string) =>
     }
     await deleteOwnCalculator(calculator.id, tx)
   })
-
-/** A page of the versions that were kept, the newest first. */
-export async function listVersions(
-  courseId: number,
-  key: string,
-  { cursor, limit }: PageQuery,
-): Promise<Page<OwnCalculatorVersion>> {
-  const found = await findOwnCalculator(courseId, key)
-  if (!found) throw notFound('calculator')
-  const [rows, attached] = await Promise.all([
-    listOwnVersions(found.calculator.id, { before: readCursor(cursor), limit: limit + 1 }),
-    countAttached(courseId),
-  ])
-  const shown = rows.slice(0, limit)
-  return {
-    items: shown.map(({ number, definition, createdAt }) => ({
-      version: number,
-      definition,
-      createdAt: createdAt.toISOString(),
-      stops: attached.find((one) => one.key === key && one.version === number)?.stops ?? 0,
-    })),
-    nextCursor: rows.length > limit ? String(shown.at(-1)?.number) : null,
-  }
-}
-
-/** The own calculator that a stop of a revision is made of, as it was when it was attached; or null. */
-export async function findOwnAtStop(
-  revisionId: number,
-  lessonKey: string,
-  stopKey: string,
-): Promise<OwnSnapshot | null> {
-  const definition = await findCalculatorAt(revisionId, lessonKey, stopKey)
-  return definition?.own ?? null
-}
-
-/** Titles of a course's own calculators by the ids they have in exercises and field books. */
-export async function nameOwnCalculators(courseId: number): Promise<Map<string, string>> {
-  const titles = await listOwnTitles(courseId)
-  return new Map([...titles].map(([key, title]) => [`${OWN_PREFIX}${key}`, title]))
-}

@@ -1,6 +1,6 @@
 import type { MathNode } from 'mathjs'
 import { FormulaError } from './formulaError'
-import { parseFormula } from './math'
+import { parseTokens } from './syntax'
 import { tokenise, type Token } from './tokens'
 import { formulaFunctions, formulaUnits } from './vocabulary'
 import { TokenWalk } from './tokenWalk'
@@ -48,48 +48,9 @@ export function readFormula(formula: string): Formula {
     throw new FormulaError(column, length, message, 'Give a part of it an output of its own.')
   }
   const walk = new TokenWalk(tokens, formula.length)
-  const root = readNode(parse(tokens, formula), walk)
+  const root = readNode(parseTokens(tokens, formula), walk)
   walk.finish()
   return { root, tokens }
-}
-
-function parse(tokens: Token[], formula: string): MathNode {
-  const starts: number[] = []
-  let text = ''
-  for (const token of tokens) {
-    starts.push(text.length + 1)
-    text += `${token.text} `
-  }
-  try {
-    return parseFormula(text.trimEnd())
-  } catch (error) {
-    if (!(error instanceof SyntaxError)) throw error
-    const { char = 1 } = error as SyntaxError & { char?: number }
-    const index = starts.findIndex((start, at) => char < start + (tokens[at]?.text.length ?? 0))
-    throw explain(error.message, tokens[index], formula)
-  }
-}
-
-const sentences: [pattern: RegExp, message: string, wayOut: string][] = [
-  [/Parenthesis \)/, 'A bracket is not closed.', 'Put a ) where it ends.'],
-  [
-    /operator ,/,
-    'A comma only stands between the values of a function.',
-    'Write decimals with a point.',
-  ],
-  [/False part/, 'A choice has two sides.', 'Write test ? one : other.'],
-  [/end of expression/, 'Something is missing at the end.', 'Write what comes next.'],
-  [/Value expected/, 'Something is missing before this.', 'Put a number or a name there.'],
-  [/Unexpected part/, 'A sign is missing before this.', 'Put + - * or / between the two.'],
-]
-
-function explain(said: string, at: Token | undefined, formula: string): FormulaError {
-  const { column, length } = at ?? { column: formula.trimEnd().length + 1, length: 1 }
-  const known = sentences.find(([pattern]) => pattern.test(said))
-  if (!known) {
-    return new FormulaError(column, length, 'This cannot be read.', 'Look at what stands here.')
-  }
-  return new FormulaError(column, length, known[1], known[2])
 }
 
 /** The shape of the nodes that are looked at; mathjs's own types leave their kinds open. */
