@@ -90,7 +90,7 @@ async function build(lesson: Lesson): Promise<void> {
   }
   writeFileSync(file('json'), `${JSON.stringify(facts, null, 2)}\n`)
   writeFileSync(file('vtt'), toWebVtt(cues))
-  writeFileSync(file('jpg'), paint(timeline.end(lesson.posterLine)).toBuffer('image/jpeg', 88))
+  writeFileSync(file('webp'), paint(timeline.end(lesson.posterLine)).toBuffer('image/webp', 80))
   const megabytes = (statSync(file('mp4')).size / 1e6).toFixed(2)
   console.log(`${lesson.id}: ${durationSeconds.toFixed(1)} s, ${cues.length} cues, ${megabytes} MB`)
 }

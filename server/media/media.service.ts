@@ -65,5 +65,5 @@ export async function findPosterFile(videoId: number, viewer: Viewer): Promise<S
   const video = await findVideo(videoId)
   if (!video?.posterKey) throw notFound('picture')
   await checkMaySee(video, viewer, { needsKit: false })
-  return locate(video.posterKey, 'image/jpeg', `poster-${video.id}`)
+  return locate(video.posterKey, 'image/webp', `poster-${video.id}`)
 }

@@ -14,7 +14,7 @@ async function takePicture(source: string, target: string, atMs: number, signal?
       ...['-nostdin', '-v', 'error', '-y', '-threads', '1'],
       ...['-ss', (atMs / 1000).toFixed(3), ...inputLimits, '-i', `file:${source}`],
       ...['-map', '0:V:0', '-frames:v', '1', '-vf', "scale='min(1280,iw)':-2"],
-      ...['-q:v', '4', '-f', 'image2', '-c:v', 'mjpeg', '-update', '1', `file:${target}`],
+      ...['-c:v', 'libwebp', '-quality', '80', '-f', 'webp', `file:${target}`],
     ],
     { timeoutMs: posterTimeoutMs, ...(signal ? { signal } : {}) },
   )
@@ -24,7 +24,7 @@ async function takePicture(source: string, target: string, atMs: number, signal?
 }
 
 /**
- * Takes a picture out of a video's first seconds, as a JPEG file of at most 1280 points' width;
+ * Takes a picture out of a video's first seconds, as a WebP file of at most 1280 points' width;
  * returns its path, or null when no picture can be read. Whoever asks removes the file.
  */
 export async function makePoster(
@@ -33,7 +33,7 @@ export async function makePoster(
 ): Promise<string | null> {
   const folder = join(config.dataDir, 'posters')
   await mkdir(folder, { recursive: true })
-  const target = join(folder, `${videoId}-${process.pid}.jpg`)
+  const target = join(folder, `${videoId}-${process.pid}.webp`)
   for (const atMs of [Math.min(latestMs, durationMs / 10), 0]) {
     if (await takePicture(source, target, atMs, signal)) return target
   }

@@ -58,7 +58,7 @@ async function judgeFile(video: VideoRow, path: string, signal: AbortSignal) {
   const { durationMs } = judgement
   const poster = await makePoster(path, { videoId: video.id, durationMs, signal })
   if (!poster) return { judgement: unreadablePicture(), posterKey: null }
-  const posterKey = `posters/${video.id}.jpg`
+  const posterKey = `posters/${video.id}.webp`
   await mediaStorage.put(posterKey, poster)
   await rm(poster, { force: true })
   return { judgement, posterKey }

@@ -56,7 +56,7 @@ export async function createAccessScene(app: TestApp) {
       stopKey = stop.key
     },
   })
-  const posterKey = 'posters/1.jpg'
+  const posterKey = 'posters/1.webp'
   await db.update(videos).set({ posterKey }).where(eq(videos.id, course.video.id))
   await store(course.video.storageKey)
   await store(posterKey)

@@ -26,7 +26,7 @@ export async function insertVideo(
       .values({
         ...place,
         storageKey: inDemoFolder(`${video.id}.mp4`),
-        posterKey: inDemoFolder(`${video.id}.jpg`),
+        posterKey: inDemoFolder(`${video.id}.webp`),
         originalName: `${video.id}.mp4`,
         bytes: video.bytes,
         state: 'ready',

@@ -39,7 +39,7 @@ async function createDraft(isSample = false) {
   const stage = await createStage(course.revisionId, { kind: 'frame', title: 'Frame' })
   const lesson = await createLesson(stage, { isSample, hazards: [{ kind: 'saw', label: 'Saw' }] })
   const kit = [await createKitItem(lesson.id), await createKitItem(lesson.id, { kind: 'caution' })]
-  const video = await createVideo(course.id, lesson, { posterKey: 'posters/1.jpg' })
+  const video = await createVideo(course.id, lesson, { posterKey: 'posters/1.webp' })
   const captions = await createCaptions(video.id)
   const stop = await createStop(lesson.id, { atMs: 5000 })
   await createQuiz(stop.id, { questions: [singleQuestion()] })

@@ -220,7 +220,7 @@ describe('GET media/videos/:videoId/file', () => {
     const storageKey = 'demo:squaring-the-form.mp4'
     await db
       .update(videos)
-      .set({ storageKey, posterKey: 'demo:squaring-the-form.jpg' })
+      .set({ storageKey, posterKey: 'demo:squaring-the-form.webp' })
       .where(eq(videos.id, course.video.id))
     const agent = await app.asUser(learner)
     const answer = await agent.get(file).set('Range', 'bytes=4-7').expect(206)

@@ -65,8 +65,8 @@ describe('uploads', () => {
     const poster = await agent
       .get(seen.video!.posterUrl!)
       .expect(200)
-      .expect('Content-Type', 'image/jpeg')
-    expect((poster.body as Buffer).subarray(0, 2).toString('hex')).toBe('ffd8')
+      .expect('Content-Type', 'image/webp')
+    expect((poster.body as Buffer).subarray(8, 12).toString()).toBe('WEBP')
     const back = await agent.get(seen.video!.src!).expect(200)
     expect(Buffer.compare(back.body as Buffer, film)).toBe(0)
   })
