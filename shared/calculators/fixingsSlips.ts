@@ -1,5 +1,6 @@
 import type { Slip, Values } from './calculator'
 import { numberOf, optionalNumber } from './values'
+import { roundDownTo } from '../units/number'
 
 const boards = (values: Values) => numberOf(values, 'boards')
 const supports = (values: Values) => numberOf(values, 'supports')
@@ -44,7 +45,8 @@ export const fixingsSlips: Slip[] = [
     id: 'spare-rounded-down',
     title: 'Rounded down',
     output: 'fixings',
-    wrong: (values, outputs) => Math.floor(driven(outputs) * (1 + numberOf(values, 'spare') / 100)),
+    wrong: (values, outputs) =>
+      roundDownTo(driven(outputs) * (1 + numberOf(values, 'spare') / 100), 1),
     sentence: 'That is rounded down.',
     wayBack: 'There is no part of a screw: round up.',
   },

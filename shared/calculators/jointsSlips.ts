@@ -23,7 +23,10 @@ function panelSlips(output: 'panelsLong' | 'panelsWide', side: 'length' | 'width
       id: `rounded-down-${side}`,
       title: 'Panels rounded down',
       output,
-      wrong: (values, outputs) => Math.floor(parts(values, outputs) + 1e-9),
+      wrong: (values, outputs) => {
+        const whole = Math.floor(parts(values, outputs) + 1e-9)
+        return whole < parts(values, outputs) - 1e-9 ? whole : undefined
+      },
       sentence: 'That is rounded down: the panels get longer than the spacing allows.',
       wayBack: 'Round up to the next whole panel, then share the side out evenly.',
     },
@@ -81,7 +84,7 @@ export const jointsSlips: Slip[] = [
     title: 'The widest spacing used as it is',
     output: 'panelLength',
     wrong: (_values, outputs) => spacingOf(outputs),
-    sentence: 'That leaves a narrow strip at the end.',
+    sentence: 'That is how far apart joints may lie at most, not how long a panel comes out.',
     wayBack: 'Share the length out evenly over the panels.',
   },
   {
@@ -100,7 +103,7 @@ export const jointsSlips: Slip[] = [
     title: 'The widest spacing used as it is',
     output: 'panelWidth',
     wrong: (_values, outputs) => spacingOf(outputs),
-    sentence: 'That leaves a narrow strip at the side.',
+    sentence: 'That is how far apart joints may lie at most, not how wide a panel comes out.',
     wayBack: 'Share the width out evenly over the panels.',
   },
   {

@@ -16,7 +16,7 @@ const liftSlips: Slip[] = [
     title: 'Whole weight lifted',
     output: 'liftForce',
     wrong: (values) => lidForce(values),
-    sentence: 'That lifts the whole lid: the hinge carries a part of it.',
+    sentence: 'That is the weight of the whole lid, as if there were no hinge.',
     wayBack: 'Multiply by half the depth, then divide by the distance from hinge to handle.',
   },
   {
@@ -104,7 +104,7 @@ export const lidSlips: Slip[] = [
     output: 'liftForceWithSnow',
     wrong: (_values, outputs) =>
       snowOrNone(outputs, numberOf(outputs, 'liftForce') + snowForce(outputs)),
-    sentence: 'That lifts the whole snow: the hinge carries a part of it too.',
+    sentence: 'That adds the whole weight of the snow, as if there were no hinge.',
     wayBack: 'The snow lies on the middle like the lid’s own weight: use the same lever.',
   },
 ]

@@ -1,6 +1,7 @@
 import type { Slip, Values } from './calculator'
 import { findBag } from './bags'
 import { numberOf, optionalNumber, wordOf } from './values'
+import { roundDownTo } from '../units/number'
 
 const yieldOf = (values: Values) =>
   optionalNumber(values, 'bagYield') ?? findBag(wordOf(values, 'bag')).yield
@@ -113,7 +114,8 @@ export const postholeSlips: Slip[] = [
     id: 'bags-rounded-down',
     title: 'Bags rounded down',
     output: 'bags',
-    wrong: (values, outputs) => Math.floor(numberOf(outputs, 'volumeWithWaste') / yieldOf(values)),
+    wrong: (values, outputs) =>
+      roundDownTo(numberOf(outputs, 'volumeWithWaste') / yieldOf(values), 1),
     sentence: 'That is rounded down: the last hole stays short.',
     wayBack: 'Bags are bought whole: round up, however small the part.',
   },

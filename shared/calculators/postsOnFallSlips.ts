@@ -72,7 +72,8 @@ export const postsOnFallSlips: Slip[] = [
     output: 'difference',
     wrong: (values) => numberOf(values, 'run') * numberOf(values, 'fall'),
     sentence: 'That is the fall from edge to edge.',
-    wayBack: 'The posts stand in from the edges: only the fall between them counts.',
+    wayBack:
+      'Only the part between the first post and the last counts, and the pitch of the top with it.',
   },
   {
     id: 'difference-roof-forgotten',

@@ -1,6 +1,6 @@
 import type { Slip, Values } from './calculator'
 import { numberOf } from './values'
-import { roundUp } from '../units/number'
+import { roundDownTo, roundUp } from '../units/number'
 
 /** A 27 in sheet that covers 24 in gives this much to its neighbour: what a whole sheet is wider than its cover. */
 const SIDE_LAP = 3 * 0.0254
@@ -34,7 +34,7 @@ const acrossSlips: Slip[] = [
     id: 'across-rounded-down',
     title: 'Rounded down',
     output: 'across',
-    wrong: (values) => Math.floor(widthToCover(values) / cover(values)),
+    wrong: (values) => roundDownTo(widthToCover(values) / cover(values), 1),
     sentence: 'That is rounded down: a strip at the side stays open.',
     wayBack: 'Sheets are bought whole: round up, however small the part.',
   },
@@ -62,7 +62,7 @@ const rowSlips: Slip[] = [
     title: 'Rounded down',
     output: 'rows',
     wrong: (values) =>
-      Math.floor((slopeToCover(values) - lap(values)) / (sheet(values) - lap(values))),
+      roundDownTo((slopeToCover(values) - lap(values)) / (sheet(values) - lap(values)), 1),
     sentence: 'That is rounded down: the top of the roof stays open.',
     wayBack: 'A part of a row is a row: round up.',
   },

@@ -1,6 +1,7 @@
 import type { Slip, Values } from './calculator'
 import { findBag } from './bags'
 import { numberOf, optionalNumber, wordOf } from './values'
+import { roundDownTo } from '../units/number'
 
 const yieldOf = (values: Values) =>
   optionalNumber(values, 'bagYield') ?? findBag(wordOf(values, 'bag')).yield
@@ -81,7 +82,7 @@ export const slabSlips: Slip[] = [
     id: 'bags-rounded-down',
     title: 'Bags rounded down',
     output: 'bags',
-    wrong: (values, outputs) => Math.floor(withWaste(outputs) / yieldOf(values)),
+    wrong: (values, outputs) => roundDownTo(withWaste(outputs) / yieldOf(values), 1),
     sentence: 'That is rounded down: the last corner stays empty.',
     wayBack: 'Bags are bought whole: round up, however small the part.',
   },

@@ -41,7 +41,7 @@ const densitySlips: Slip[] = [
       return loose > 30 ? loose * PCF : undefined
     },
     sentence: 'That is denser than the rule lets settled snow become.',
-    wayBack: 'Stop at 30 lb/ft³.',
+    wayBack: 'However much it snows, stop at the most that the rule gives.',
   },
 ]
 
