@@ -1,7 +1,15 @@
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, vi } from 'vitest'
 import { calculators, findCalculator } from '../../../shared/calculators/index'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
 import { buildCalculatorExercise, gradeTyped } from './exercises'
+
+/** The slips in the tables beside the calculators’ tests, each as its calculator and its id. */
+const inOtherTables = vi.hoisted((): string[] => [])
+vi.mock('../calculators/slipCases', () => ({
+  describeSlips: (id: string, _usual: unknown, rows: readonly { slip: string }[]) => {
+    inOtherTables.push(...rows.map(({ slip }) => `${id} ${slip}`))
+  },
+}))
 
 interface SlipCase {
   calculator: string
@@ -278,26 +286,25 @@ describe('every slip', () => {
     expect(verdict).toMatchObject({ right: true, outcome: 'right', slip: null })
   })
 
-  it('is in this table', () => {
-    const tried = cases.map(({ calculator, slip }) => `${calculator} ${slip}`)
+  it('is in this table or in that of its calculator, and in no other', async () => {
+    const tables = import.meta.glob('../calculators/*Slips.test.ts')
+    await Promise.all(Object.values(tables).map((read) => read()))
+    const here = cases.map(({ calculator, slip }) => `${calculator} ${slip}`)
+    const tried = [...here, ...inOtherTables]
     const all = calculators.flatMap(({ id, slips }) => slips.map((slip) => `${id} ${slip.id}`))
     expect(all.filter((name) => !tried.includes(name))).toEqual([])
+    expect(tried.filter((name) => !all.includes(name))).toEqual([])
   })
 
-  it('is silent where it gives the right number by chance', () => {
-    // Exactly 10 bags of 10 L: rounding down is rounding up.
-    const texts = { length: '1 m', width: '1 m', thickness: '100 mm', waste: '0', bagYield: '10 L' }
-    const one = {
-      calculator: 'slab',
-      texts,
-      asked: 'bags',
-      slip: '',
-      typed: '',
-      right: '10',
-      within: 0,
-    }
-    expect(gradeTyped(exerciseOf(one), '10', 'metric', texts).outcome).toBe('right')
-    expect(gradeTyped(exerciseOf(one), '9', 'metric', texts).outcome).toBe('wrong')
+  // Rounding down is rounding up: 100 L ÷ 10 L, and 144 L ÷ 12 L, which binary arithmetic does not make quite 12.
+  it.each([
+    { side: '1 m', bagYield: '10 L', right: '10', fewer: '9' },
+    { side: '1.2 m', bagYield: '12 L', right: '12', fewer: '11' },
+  ])('is silent where it gives the right $right by chance', ({ side, bagYield, right, fewer }) => {
+    const texts = { length: side, width: side, thickness: '100 mm', waste: '0', bagYield }
+    const exercise = exerciseOf({ ...bags, texts, slip: '', typed: fewer, right })
+    expect(gradeTyped(exercise, right, 'metric', texts).outcome).toBe('right')
+    expect(gradeTyped(exercise, fewer, 'metric', texts).outcome).toBe('wrong')
   })
 
   it('is silent where it comes within the tolerance of the right number', () => {
