@@ -33,7 +33,8 @@ export function readInputs(
   return { ok: Object.keys(errors).length === 0, values, errors }
 }
 
-function readInput(
+/** Reads what was typed into one input. */
+export function readInput(
   input: CalculatorInput,
   typed: string | undefined,
   system: UnitSystem,

@@ -40,6 +40,8 @@ export const calculatorDefinitionSchema = z.strictObject({
   hints: z.array(z.string().trim().min(1).max(300)).max(5),
   /** Ids of the calculator's slips that this stop names. */
   slips: z.array(z.string()).max(20),
+  /** The units an answer may be written in; none means any. A bare number is always taken in the field's own unit. */
+  acceptedUnits: z.array(z.string().min(1).max(20)).max(12).optional(),
 })
 export type CalculatorDefinition = z.infer<typeof calculatorDefinitionSchema>
 

@@ -58,13 +58,31 @@ export function gradeCalculator(
   }
   const read = readAnswer(output, answer.answer, answer.units)
   if (!read.ok) return unreadVerdict(read.message, 'answer')
+  const refused = refuseUnit(answer.answer, read, definition)
+  if (refused) return unreadVerdict(refused, 'answer')
   const said = withUnit(answer.answer, output, answer.units)
   if (matches(read.value, right, definition)) return rightVerdict(said)
   const slip = findSlip(calculator, definition, run, read.value, answer.units)
   return slip ? slipVerdict(slip) : wrongVerdict(said)
 }
 
-type ReadAnswer = { ok: true; value: number | string } | { ok: false; message: string }
+type ReadAnswer =
+  | { ok: true; value: number | string; unit?: string; bare?: boolean }
+  | { ok: false; message: string }
+
+/** Why an answer's unit is not taken here; undefined where it is. */
+function refuseUnit(
+  typed: string,
+  read: { unit?: string; bare?: boolean },
+  { acceptedUnits = [] }: CalculatorDefinition,
+): string | undefined {
+  const { unit, bare } = read
+  if (acceptedUnits.length === 0 || unit === undefined || bare === true) return undefined
+  // Feet and inches in one are inches, or feet.
+  const forms = unit === 'ft in' ? [unit, 'in', 'ft'] : [unit]
+  if (forms.some((form) => acceptedUnits.includes(form))) return undefined
+  return `“${typed.trim()}” is in ${unit}. Here the answer is taken in ${acceptedUnits.join(', ')}.`
+}
 
 /** An answer as a value of the asked output; a bare number takes the unit its field shows. */
 export function readAnswer(output: CalculatorOutput, text: string, system: UnitSystem): ReadAnswer {

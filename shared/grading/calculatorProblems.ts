@@ -1,15 +1,17 @@
 import type { Calculator, CalculatorInput } from '../calculators/calculator'
-import { checkBounds } from '../calculators/readInputs'
+import { checkBounds, readInput } from '../calculators/readInputs'
 import { fieldUnit, runCalculator, showInput } from '../calculators/index'
-import type { CalculatorDefinition, ExerciseInput } from '../contracts/exercises'
+import type { CalculatorDefinition, ExerciseInput, UnitSystem } from '../contracts/exercises'
 import type { OwnSnapshot } from '../contracts/ownCalculators'
 import { checkOwnCalculator } from '../ownCalculators'
 import { parseQuantity } from '../units/parse'
+import { unitNames } from '../units/unit'
 import { calculatorOf } from './calculatorOf'
 import { toleranceOf } from './tolerance'
 import type { CalculatorExercise } from './calculatorExercise'
 import { drawInputs } from './drawInputs'
 import type { ExerciseProblem } from './grader'
+import { findNearTie } from './nearTie'
 
 /** Learners tried out, beside the ends of every range. */
 const TRIED_SEEDS = 40
@@ -70,6 +72,11 @@ function findNameProblems(calculator: Calculator, definition: CalculatorDefiniti
       )
     }
   })
+  const known = output && output.quantity !== 'choice' ? unitNames(output.quantity) : []
+  for (const unit of definition.acceptedUnits ?? []) {
+    if (known.includes(unit)) continue
+    problems.push(block('definition.acceptedUnits', `“${unit}” is no unit of this answer.`))
+  }
   if (slips.length === 0) problems.push(mend('definition.slips', 'No slip is named.'))
   return problems
 }
@@ -87,6 +94,10 @@ function findInputProblems(
   if (given.value.trim() === '') {
     return input.optional ? [] : [block(path, `${input.label} is empty.`)]
   }
+  if (input.isList) {
+    const row = readInput(input, given.value, 'metric')
+    return row.ok ? [] : [block(path, row.message)]
+  }
   const unit = fieldUnit(input, 'metric')
   const read = parseQuantity(given.value, input.quantity, { system: 'metric', defaultUnit: unit })
   if (!read.ok) return [block(path, `${input.label}: ${read.message}`)]
@@ -103,6 +114,7 @@ function findRangeProblems(
 ): ExerciseProblem[] {
   if (input.quantity === 'choice')
     return [block(path, `${input.label} is chosen and has no range.`)]
+  if (input.isList) return [block(path, `${input.label} is a row of numbers and has no range.`)]
   if (range.min > range.max) return [block(path, `${input.label}: “from” is more than “to”.`)]
   for (const end of [range.min, range.max]) {
     const bounds = checkBounds(input, end, 'metric')
@@ -137,7 +149,27 @@ function findDrawProblems(
       return [block('definition.asked', 'With these inputs there is no such answer to work out.')]
     }
   }
-  return findToleranceProblems(calculator, definition)
+  return [
+    ...findToleranceProblems(calculator, definition),
+    ...findTieProblems(tried, definition, draws),
+  ]
+}
+
+/** Learners whose answer a hair decides: two careful people would differ. */
+function findTieProblems(
+  calculator: Calculator,
+  definition: CalculatorDefinition,
+  draws: { texts: Record<string, string>; system: UnitSystem }[],
+): ExerciseProblem[] {
+  const ties = draws.filter(({ texts, system }) => {
+    const run = runCalculator(calculator, texts, system)
+    return run.ok && findNearTie(calculator, run.values, definition.asked, system) !== undefined
+  })
+  if (ties.length === 0) return []
+  const numbers = describeRanged(definition, ties[0]?.texts ?? {})
+  const of = numbers === '' ? '' : `, as with ${numbers}`
+  const message = `${String(ties.length)} of ${String(draws.length)} tried learners stand on an edge${of}: a hair more or less gives another answer. Move the range or its step.`
+  return [mend('definition.asked', message)]
 }
 
 const systems = ['metric', 'imperial'] as const

@@ -1,5 +1,5 @@
 import type { CalculatorInput } from '../calculators/calculator'
-import { fieldUnit, showInput } from '../calculators/fields'
+import { convertText, fieldUnit, showInput } from '../calculators/fields'
 import type { CalculatorDefinition, ExerciseInput, UnitSystem } from '../contracts/exercises'
 import { clean } from '../units/number'
 import { parseQuantity } from '../units/parse'
@@ -43,6 +43,7 @@ export function drawValue({ min, max, step }: Ranged, seed: number): number {
 /** A text as typed where its unit belongs to the system, else said in the system; a bare number is metric. */
 function textIn(input: CalculatorInput, text: string, system: UnitSystem): string {
   if (input.quantity === 'choice' || text.trim() === '') return text
+  if (input.isList) return convertText(input, text, 'metric', system)
   const unit = fieldUnit(input, 'metric')
   const read = parseQuantity(text, input.quantity, { system: 'metric', defaultUnit: unit })
   if (!read.ok) return text

@@ -154,6 +154,16 @@ export function findUnit(quantity: Quantity, written: string): Unit | undefined 
   )
 }
 
+/** However it is asked for, a slope can be said in each of these; `:` is rise over run, 1:48 or 4/12. */
+const slopeForms = ['°', '%', ':', 'mm/m', 'in/ft']
+const slopeQuantities: Quantity[] = ['angle', 'ratio', 'risePer12']
+
+/** The units a value of this quantity can be written in, by the names the parser gives them. */
+export function unitNames(quantity: Quantity): string[] {
+  if (slopeQuantities.includes(quantity)) return slopeForms
+  return units[quantity].map(({ name }) => name).filter(Boolean)
+}
+
 /** The quantities that have a unit written so, to tell a person what a wrong unit measures. */
 export function quantitiesOfUnit(written: string): Quantity[] {
   if (written.trim() === '') return []

@@ -41,6 +41,20 @@ describe('gradeExercise on a calculator stop', () => {
     expect(verdict.field).toBe(outcome === 'unread' ? 'answer' : null)
   })
 
+  it.each([
+    ['1500', 'right'],
+    ['1500 mm', 'right'],
+    [`4' 11-1/16"`, 'right'],
+    ['59.055 in', 'right'],
+    ['1.5 m', 'unread'],
+    ['150 cm', 'unread'],
+  ])('takes %s, told in which units to answer: %s', (answer, outcome) => {
+    const narrow = buildCalculatorExercise({ acceptedUnits: ['mm', 'in'] })
+    const verdict = gradeTyped(narrow, answer)
+    expect(verdict.outcome).toBe(outcome)
+    if (outcome === 'unread') expect(verdict.message).toContain('taken in mm, in.')
+  })
+
   it('reads a bare number in inches for who works in feet', () => {
     const feet = buildCalculatorExercise({
       inputs: {

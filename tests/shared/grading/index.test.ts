@@ -150,6 +150,7 @@ describe('findExerciseProblems', () => {
     ['an unknown calculator', { calculator: 'moon' }, 'definition.calculator'],
     ['an unknown answer', { asked: 'moon' }, 'definition.asked'],
     ['an unknown slip', { slips: ['moon'] }, 'definition.slips.0'],
+    ['a unit of something else', { acceptedUnits: ['mm', 'kg'] }, 'definition.acceptedUnits'],
     [
       'an unknown input',
       { inputs: { ...inputs, moon: { mode: 'fixed', value: '1' } } },
@@ -244,6 +245,63 @@ describe('findExerciseProblems', () => {
       ['definition.inputs.unit', false],
     ])
     expect(gradeTyped(bare, '1500').right).toBe(true)
+  })
+
+  const posts = {
+    run: { mode: 'fixed' as const, value: '1100 mm' },
+    fall: { mode: 'fixed' as const, value: '10 mm/m' },
+    positions: { mode: 'fixed' as const, value: '50 mm; 550 mm; 1050 mm' },
+    topHeight: { mode: 'fixed' as const, value: '1480 mm' },
+  }
+  const ofPosts = (changes: object) =>
+    buildCalculatorExercise({
+      ...{ calculator: 'posts-on-fall', asked: 'longest', inputs: posts, slips: [] },
+      ...changes,
+    })
+
+  it('takes a row of numbers as it is typed, and says so where it cannot be read', () => {
+    expect(blocking(ofPosts({}))).toEqual([])
+    const wrong = { ...posts, positions: { mode: 'fixed', value: '50 mm; wide' } }
+    expect(blocking(ofPosts({ inputs: wrong })).map(({ path }) => path)).toEqual([
+      'definition.inputs.positions',
+    ])
+    const ranged = { ...posts, positions: { mode: 'ranged', min: 0.1, max: 0.2, step: 0.1 } }
+    expect(blocking(ofPosts({ inputs: ranged }))[0]?.message).toContain('has no range')
+  })
+
+  it('shows a row of numbers in the units of who reads it, and grades by it', () => {
+    const { definition } = ofPosts({})
+    const calculator = findCalculator('posts-on-fall')
+    if (!calculator) throw new Error('the calculator is not there')
+    expect(drawInputs(definition, calculator, 1, 'imperial')['positions']).toBe(
+      `1-15/16"; 1' 9-5/8"; 3' 5-5/16"`,
+    )
+    expect(gradeTyped(ofPosts({}), '1490.5').right).toBe(true)
+    expect(gradeTyped(ofPosts({}), `4' 10-11/16"`, 'imperial').right).toBe(true)
+  })
+
+  it('never lets a row of numbers be asked for', () => {
+    expect(blocking(ofPosts({ asked: 'lengths' }))[0]?.message).toContain('cannot be asked for')
+  })
+
+  it('warns of a whole number that a hair decides', () => {
+    const bags = buildCalculatorExercise({
+      calculator: 'slab',
+      asked: 'bags',
+      inputs: {
+        length: { mode: 'ranged', min: 5, max: 5.2, step: 0.2 },
+        width: { mode: 'fixed', value: '2 m' },
+        thickness: { mode: 'fixed', value: '100 mm' },
+        waste: { mode: 'fixed', value: '0 %' },
+        bag: { mode: 'fixed', value: '25 kg' },
+        bagYield: { mode: 'fixed', value: '20 L' },
+      },
+      tolerance: { kind: 'absolute', value: 0 },
+      slips: ['bags-rounded-down'],
+    })
+    const found = findExerciseProblems(bags).find(({ message }) => message.includes('on an edge'))
+    expect(found).toMatchObject({ path: 'definition.asked', blocking: false })
+    expect(found?.message.replaceAll(/\s/g, ' ')).toContain('as with length 5000 mm')
   })
 
   it('blocks a quiz without questions, and two with one key', () => {
