@@ -65,7 +65,7 @@ export function rangeAbout(input: CalculatorInput, text: string, system: UnitSys
 /** A calculator's exercise to begin with: the numbers it starts with itself, its first answer asked for. */
 export function newDefinition(id: string, system: UnitSystem): DefinitionDraft {
   const calculator = findCalculator(id)
-  const output = calculator?.outputs[0]
+  const output = calculator?.outputs.find(({ isList }) => !isList)
   return {
     calculator: id,
     inputs: Object.fromEntries(
