@@ -1,6 +1,7 @@
 import { drawLumberSizePicture } from './lumberSizePicture'
 import { drawStairsPicture } from './stairsPicture'
 import { drawAngleCutPicture } from './angleCutPicture'
+import { drawCutListPicture } from './cutListPicture'
 import { drawPostsOnFallPicture } from './postsOnFallSheet'
 import { drawSpacingPicture } from './spacingPicture'
 import { drawBoardsPicture } from './boardsPicture'
@@ -76,6 +77,7 @@ const PICTURES: Readonly<Record<string, DrawPicture>> = {
   spacing: drawSpacingPicture,
   'posts-on-fall': drawPostsOnFallPicture,
   'angle-cut': drawAngleCutPicture,
+  cutlist: drawCutListPicture,
   stairs: drawStairsPicture,
   'lumber-size': drawLumberSizePicture,
 }
