@@ -87,6 +87,12 @@ export const routes: RouteRecordRaw[] = [
         meta: { title: 'Calculators' },
       },
       {
+        path: 'calculators/cutlist',
+        name: 'cutlist',
+        component: () => import('../pages/exercises/CutListPage.vue'),
+        meta: { title: 'Cut list' },
+      },
+      {
         path: 'calculators/:id',
         name: 'calculator',
         component: () => import('../pages/exercises/CalculatorPage.vue'),

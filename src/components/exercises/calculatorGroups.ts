@@ -1,3 +1,23 @@
+import { findCalculator } from '../../../shared/calculators'
+
+/** What the list says of a calculator. */
+interface ListedCalculator {
+  id: string
+  title: string
+  question: string
+}
+
+/** Tables instead of single numbers: it has a page of its own and is not in the registry. */
+export const cutListEntry: ListedCalculator = {
+  id: 'cutlist',
+  title: 'Cut list',
+  question: 'Which lengths to buy, and how to cut them?',
+}
+
+/** A calculator of the list by its id, whichever page it has. */
+export const findListed = (id: string): ListedCalculator | undefined =>
+  id === cutListEntry.id ? cutListEntry : findCalculator(id)
+
 /** The calculators along the stages of a build. */
 export const calculatorGroups: { title: string; about: string; ids: string[] }[] = [
   {
@@ -13,5 +33,5 @@ export const calculatorGroups: { title: string; about: string; ids: string[] }[]
   },
   { title: 'Cladding', about: 'Boards', ids: ['taper', 'boards'] },
   { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid', 'rafter'] },
-  { title: 'Finish', about: 'Screws and oil', ids: ['coating', 'fixings'] },
+  { title: 'Finish', about: 'Oil, and what to buy', ids: ['coating', 'fixings', 'cutlist'] },
 ]
