@@ -17,6 +17,7 @@ export const router = createRouter({
   routes,
   scrollBehavior(to, from, saved) {
     if (saved) return saved
+    if (from.matched.length === 0) return to.hash ? { el: to.hash, top: 16 } : undefined
     if (to.hash) return { el: to.hash, top: 16 }
     return to.path === from.path ? undefined : { top: 0 }
   },
