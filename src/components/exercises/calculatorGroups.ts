@@ -18,20 +18,20 @@ export const cutListEntry: ListedCalculator = {
 export const findListed = (id: string): ListedCalculator | undefined =>
   id === cutListEntry.id ? cutListEntry : findCalculator(id)
 
-/** The calculators along the stages of a build. */
+/** The calculators along the stages of a build, in each the one that is met first in front. */
 export const calculatorGroups: { title: string; about: string; ids: string[] }[] = [
   {
     title: 'Ground',
     about: 'Setting out and digging',
-    ids: ['square', 'diagonals', 'fall', 'corner', 'posthole'],
+    ids: ['square', 'corner', 'diagonals', 'fall', 'posthole'],
   },
-  { title: 'Base', about: 'Stone and concrete', ids: ['slab', 'mix', 'joints', 'gravel', 'batch'] },
+  { title: 'Base', about: 'Stone and concrete', ids: ['gravel', 'slab', 'mix', 'joints', 'batch'] },
   {
     title: 'Frame',
-    about: 'Posts and slopes',
-    ids: ['pitch', 'spacing', 'posts-on-fall', 'angle-cut', 'stairs', 'lumber-size'],
+    about: 'Posts, rafters, steps',
+    ids: ['posts-on-fall', 'spacing', 'pitch', 'rafter', 'angle-cut', 'stairs', 'lumber-size'],
   },
-  { title: 'Cladding', about: 'Boards', ids: ['taper', 'boards'] },
-  { title: 'Roof', about: 'Sheets and snow', ids: ['sheets', 'snow', 'lid', 'rafter'] },
-  { title: 'Finish', about: 'Oil, and what to buy', ids: ['coating', 'fixings', 'cutlist'] },
+  { title: 'Cladding', about: 'Boards and gaps', ids: ['boards', 'taper', 'fixings'] },
+  { title: 'Roof', about: 'Sheets, lids, snow', ids: ['sheets', 'lid', 'snow'] },
+  { title: 'Finish', about: 'Coats, and what to buy', ids: ['coating', 'cutlist'] },
 ]
