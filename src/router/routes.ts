@@ -117,6 +117,18 @@ export const routes: RouteRecordRaw[] = [
         meta: { title: 'The bench', ...own },
       },
       {
+        path: 'bench/courses/:courseId(\\d+)/calculators',
+        name: 'bench-own-calculators',
+        component: () => import('../pages/exercises/BenchOwnCalculatorsPage.vue'),
+        meta: { title: 'A course’s own calculators', ...own },
+      },
+      {
+        path: 'bench/courses/:courseId(\\d+)/calculators/:ownKey',
+        name: 'bench-own-calculator',
+        component: () => import('../pages/exercises/BenchOwnCalculatorPage.vue'),
+        meta: { title: 'A calculator on the bench', ...own },
+      },
+      {
         path: 'bench/courses/:courseId(\\d+)/lessons/:lessonId(\\d+)',
         name: 'bench-lesson',
         component: () => import('../pages/courses/BenchLessonPage.vue'),
