@@ -1,10 +1,7 @@
-import type {
-  Calculator,
-  CalculatorInput,
-  CalculatorOutput,
-} from '../../../shared/calculators/calculator'
+import type { CalculatorInput, CalculatorOutput } from '../../../shared/calculators/calculator'
 import { calculators, findCalculator } from '../../../shared/calculators'
 import type { QuestionKind, UnitSystem } from '../../../shared/contracts/exercises'
+import type { OwnSnapshot } from '../../../shared/contracts/ownCalculators'
 import { parseQuantity } from '../../../shared/units/parse'
 import type {
   CalculatorDraft,
@@ -16,6 +13,7 @@ import type {
   ToleranceDraft,
 } from './exerciseDrafts'
 import { inputField, withUnit } from './numberFields'
+import { findBenchFace, ownId, type BenchFace } from './ownCalculatorChoice'
 
 const millimetre = 0.001
 
@@ -26,7 +24,7 @@ export function newTolerance({ quantity }: CalculatorOutput): ToleranceDraft {
   return { kind: 'percent', value: 1 }
 }
 
-export const slipsOf = (calculator: Calculator, asked: string): string[] =>
+export const slipsOf = (calculator: Pick<BenchFace, 'slips'>, asked: string): string[] =>
   calculator.slips.filter(({ output }) => output === asked).map(({ id }) => id)
 
 export const fixedInput = (input: CalculatorInput, system: UnitSystem): InputDraft => ({
@@ -63,11 +61,15 @@ export function rangeAbout(input: CalculatorInput, text: string, system: UnitSys
 }
 
 /** A calculator's exercise to begin with: the numbers it starts with itself, its first answer asked for. */
-export function newDefinition(id: string, system: UnitSystem): DefinitionDraft {
-  const calculator = findCalculator(id)
+export function newDefinitionOf(
+  calculator: BenchFace | undefined,
+  system: UnitSystem,
+  own?: OwnSnapshot,
+): DefinitionDraft {
   const output = calculator?.outputs.find(({ isList }) => !isList)
   return {
-    calculator: id,
+    calculator: calculator?.id ?? '',
+    ...(own ? { own } : {}),
     inputs: Object.fromEntries(
       (calculator?.inputs ?? []).map((input) => [input.name, fixedInput(input, system)]),
     ),
@@ -76,6 +78,42 @@ export function newDefinition(id: string, system: UnitSystem): DefinitionDraft {
     hints: [],
     slips: calculator && output ? slipsOf(calculator, output.name) : [],
   }
+}
+export const newDefinition = (id: string, system: UnitSystem): DefinitionDraft =>
+  newDefinitionOf(findCalculator(id), system)
+
+/** The same for a version of an own calculator. */
+export const newOwnExercise = (own: OwnSnapshot, system: UnitSystem): DefinitionDraft =>
+  newDefinitionOf(findBenchFace({ calculator: ownId(own.key), own }), system, own)
+
+/** An exercise made of another version of its own calculator; what the new one still has stays as it was written. */
+export function takeVersion(
+  draft: DefinitionDraft,
+  own: OwnSnapshot,
+  system: UnitSystem,
+): DefinitionDraft {
+  const fresh = newOwnExercise(own, system)
+  const before = draft.own?.definition
+  /** What a name stands for, so that nothing is kept for a thing that only has its name. */
+  const isSame = (name: string, list: 'inputs' | 'outputs') => {
+    const find = (from: OwnSnapshot['definition'] | undefined) =>
+      from?.[list].find((one) => one.name === name)?.quantity
+    const quantity = find(own.definition)
+    return quantity !== undefined && quantity === find(before)
+  }
+  const inputs = Object.fromEntries(
+    Object.entries(fresh.inputs).map(([name, given]) => {
+      const written = draft.inputs[name]
+      return [name, written && isSame(name, 'inputs') ? written : given]
+    }),
+  )
+  if (!isSame(draft.asked, 'outputs')) return { ...fresh, inputs, hints: draft.hints }
+  const known = new Set(own.definition.slips.map(({ id }) => id))
+  const added = own.definition.slips.filter(
+    ({ id, output }) => output === draft.asked && !before?.slips.some((slip) => slip.id === id),
+  )
+  const slips = [...draft.slips.filter((id) => known.has(id)), ...added.map(({ id }) => id)]
+  return { ...draft, own, inputs, slips }
 }
 
 const triesAtFirst = 3
