@@ -15,7 +15,7 @@ export interface Remembered {
   samples: Record<string, { solved: boolean }>
 }
 
-async function describeVideo(videoId: number | null): Promise<Video | null> {
+async function describeVideo(videoId: number | null, posterUrl: string): Promise<Video | null> {
   if (videoId === null) return null
   const [video, tracks] = await Promise.all([findReadyVideo(videoId), listCaptionTracks(videoId)])
   if (!video) return null
@@ -23,13 +23,19 @@ async function describeVideo(videoId: number | null): Promise<Video | null> {
     id: video.id,
     src: `/api/media/videos/${video.id}/file`,
     contentType: video.contentType,
-    posterUrl: video.posterKey === null ? null : `/api/media/videos/${video.id}/poster`,
+    posterUrl: video.posterKey === null ? null : posterUrl,
     durationMs: video.durationMs ?? 0,
     captions: tracks.map(({ id, ...track }) => ({
       ...track,
       src: `/api/media/captions/${id}.vtt`,
     })),
   }
+}
+
+/** The picture's address follows from the lesson's, so that a page can ask for both at once. */
+function posterOf({ course, revision, lesson }: LessonAccess): string {
+  const draft = revision.issuedAt === null ? '?draft=1' : ''
+  return `/api/courses/${course.slug}/lessons/${lesson.key}/poster${draft}`
 }
 
 /** All that the lesson page shows to one person; the video only once the kit check is complete. */
@@ -45,7 +51,7 @@ export async function describeLesson(
       findDrawnBy(course.id),
       describeStages(revision, userId),
       describeKit(lesson.id, userId, remembered.kit[lesson.id] ?? []),
-      describeVideo(lesson.videoId),
+      describeVideo(lesson.videoId, posterOf(access)),
       listTapeStops(access, userId, remembered.samples),
       listHindsight(course.id, lesson.key),
       describeProgress(userId, course.id, lesson.key),

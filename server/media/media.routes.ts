@@ -1,7 +1,8 @@
 import { Router, type NextFunction, type Request, type Response } from 'express'
 import { z } from 'zod'
+import { authorizeLesson, lessonOf } from '../middleware/courseAccess'
 import { readParams } from '../middleware/validate'
-import { findPosterFile, findVideoFile, type StoredFile } from './media.service'
+import { findLessonPoster, findPosterFile, findVideoFile, type StoredFile } from './media.service'
 
 export const mediaRouter = Router()
 
@@ -15,10 +16,16 @@ function clampSuffix(request: Request, bytes: number) {
 }
 
 /** Sends a file or the part that is asked for; what was aborted by the browser is no error. */
-function sendStored(file: StoredFile, request: Request, response: Response, next: NextFunction) {
+function sendStored(
+  file: StoredFile,
+  request: Request,
+  response: Response,
+  next: NextFunction,
+  caching = 'private, max-age=3600',
+) {
   clampSuffix(request, file.bytes)
   response.setHeader('Content-Type', file.contentType)
-  response.setHeader('Cache-Control', 'private, max-age=3600')
+  response.setHeader('Cache-Control', caching)
   response.setHeader('ETag', `"${file.tag}"`)
   response.setHeader('Content-Disposition', 'inline')
   response.sendFile(
@@ -41,3 +48,13 @@ mediaRouter.get('/media/videos/:videoId/poster', async (request, response, next)
   const { videoId } = readParams(request, videoParams)
   sendStored(await findPosterFile(videoId, viewerOf(request)), request, response, next)
 })
+
+/** An address that can be known before the lesson is; it shows another picture when the lesson gets another video. */
+mediaRouter.get(
+  '/courses/:slug/lessons/:lessonKey/poster',
+  authorizeLesson('lesson:watch'),
+  async (request, response, next) => {
+    const file = await findLessonPoster(lessonOf(request).lesson.videoId)
+    sendStored(file, request, response, next, 'private, no-cache')
+  },
+)

@@ -60,10 +60,20 @@ export async function findVideoFile(videoId: number, viewer: Viewer): Promise<St
   return locate(video.storageKey, video.contentType, `video-${video.id}-${video.bytes}`)
 }
 
+const locatePoster = (id: number, posterKey: string) =>
+  locate(posterKey, 'image/webp', `poster-${id}`)
+
 /** The poster of a video whose lesson a person may open; it is shown before the kit check. */
 export async function findPosterFile(videoId: number, viewer: Viewer): Promise<StoredFile> {
   const video = await findVideo(videoId)
   if (!video?.posterKey) throw notFound('picture')
   await checkMaySee(video, viewer, { needsKit: false })
-  return locate(video.posterKey, 'image/webp', `poster-${video.id}`)
+  return locatePoster(video.id, video.posterKey)
+}
+
+/** The poster of the video that a lesson shows, for whoever was let into the lesson. */
+export async function findLessonPoster(videoId: number | null): Promise<StoredFile> {
+  const video = videoId === null ? null : await findVideo(videoId)
+  if (!video?.posterKey) throw notFound('picture')
+  return locatePoster(video.id, video.posterKey)
 }

@@ -15,6 +15,8 @@ interface Page {
   source: string
   /** What it asks the server for at once, to the letter of the client's own requests. */
   data?: (parts: string[]) => string[]
+  /** The picture that stands at its top. */
+  picture?: (parts: string[]) => string
 }
 
 const entry = 'index.html'
@@ -37,6 +39,7 @@ const pages: Page[] = [
     path: /^\/sheets\/([a-z0-9-]+)\/lessons\/([a-z0-9-]+)$/,
     source: 'src/pages/courses/LessonPage.vue',
     data: ([slug, lesson]) => [who, `/api/courses/${slug}/lessons/${lesson}`],
+    picture: ([slug, lesson]) => `/api/courses/${slug}/lessons/${lesson}/poster`,
   },
 ]
 
@@ -76,6 +79,8 @@ export function createPagePreloads(folder: string): (path: string, hasQuery: boo
     // A query may ask for a draft, a filter or another page of the list.
     const data = hasQuery ? [] : (page.data?.(parts) ?? [])
     const requests = data.map((address) => `<${address}>; rel=preload; as=fetch; crossorigin`)
-    return [...files.map(linkOf), ...requests].join(', ')
+    const picture = hasQuery ? undefined : page.picture?.(parts)
+    const pictures = picture ? [`<${picture}>; rel=preload; as=image; fetchpriority=high`] : []
+    return [...files.map(linkOf), ...requests, ...pictures].join(', ')
   }
 }

@@ -62,6 +62,7 @@ const table: Record<string, string> = {
 
   'GET /media/videos/:videoId/file': inside,
   'GET /media/videos/:videoId/poster': inside,
+  'GET /courses/:slug/lessons/:lessonKey/poster': inside,
   'GET /media/captions/:trackId.vtt': inside,
 
   'GET /bench/courses': signedIn,

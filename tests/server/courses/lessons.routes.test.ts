@@ -68,7 +68,7 @@ describe('GET /api/courses/:slug/lessons/:lessonKey', () => {
       stageKind: 'frame',
       stageTitle: 'Frame',
       durationMs: video.durationMs,
-      posterUrl: `/api/media/videos/${video.id}/poster`,
+      posterUrl: `/api/courses/${course.slug}/lessons/${lesson.key}/poster`,
       isPreview: false,
       progress: { intervals: [], watchedMs: 0, positionMs: 0, state: 'not-started' },
       can: { keepProgress: true, writeFence: true, enrol: false },

@@ -35,7 +35,10 @@ describe('createPagePreloads', () => {
 
   it('asks ahead for what the address names', () => {
     const links = preloads('/sheets/a-low-deck/lessons/digging-in', false)
-    expect(links).toContain('</api/courses/a-low-deck/lessons/digging-in>')
+    expect(links).toContain('</api/courses/a-low-deck/lessons/digging-in>; rel=preload; as=fetch')
+    expect(links).toContain(
+      '</api/courses/a-low-deck/lessons/digging-in/poster>; rel=preload; as=image',
+    )
   })
 
   it('asks for no data where a query may change it', () => {
