@@ -5,7 +5,7 @@ import { initialCutList } from './cutListInitial'
 import { readCutList } from './cutListReading'
 import {
   cellOf,
-  isConverted,
+  isShownRounded,
   rowOf,
   showTyped,
   type CutListSetting,
@@ -28,7 +28,7 @@ export function useCutListInputs(given: TypedCutList | null) {
   const typed = shallowRef(given)
   const list = computed(() => typed.value ?? initialCutList(accounts.units))
   const reading = computed(() => readCutList(list.value, accounts.units))
-  const isShownRounded = computed(() => isConverted(list.value, accounts.units))
+  const isRounded = computed(() => isShownRounded(list.value, accounts.units))
   let added = 0
 
   function write(table: CutListTable, id: string, column: string, text: string) {
@@ -78,7 +78,7 @@ export function useCutListInputs(given: TypedCutList | null) {
     typed,
     list,
     reading,
-    isShownRounded,
+    isRounded,
     write,
     setting,
     addRow,
@@ -87,3 +87,5 @@ export function useCutListInputs(given: TypedCutList | null) {
     clear,
   }
 }
+
+export type CutListInputs = ReturnType<typeof useCutListInputs>

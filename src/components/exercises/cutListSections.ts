@@ -4,6 +4,7 @@ import {
   readNominal,
 } from '../../../shared/calculators/lumberSizeTables'
 import type { UnitSystem } from '../../../shared/contracts/exercises'
+import type { CutRequest } from '../../../shared/cutlist/cutRequest'
 
 const MM_IN_INCH = 25.4
 
@@ -39,4 +40,17 @@ export function sectionOf(text: string, system: UnitSystem): string {
 /** A section as a yard of that system calls it. */
 export function showSection(section: string, system: UnitSystem): string {
   return (system === 'imperial' ? nameOfMeasured.get(section) : undefined) ?? section
+}
+
+/** A sentence about a list with its sections called as a yard of that system calls them. */
+export function nameSections(
+  sentence: string,
+  { parts }: Pick<CutRequest, 'parts'>,
+  system: UnitSystem,
+): string {
+  const sections = new Set(parts.map(({ section }) => section).filter(Boolean))
+  return [...sections].reduce(
+    (text, section) => text.replaceAll(section, showSection(section, system)),
+    sentence,
+  )
 }

@@ -74,10 +74,21 @@ export function isUntouched(row: CutListRow, table: CutListTable): boolean {
   return telling.every((name) => cellOf(row, name).text.trim() === '')
 }
 
-/** Whether anything is shown converted, and so rounded. */
-export function isConverted({ parts, stock, kerf, endTrim }: TypedCutList, system: UnitSystem) {
+/** The finest a list is shown to, in metres: a tenth of a millimetre, a sixteenth of an inch. */
+const finest: Record<UnitSystem, number> = { metric: 0.0001, imperial: 0.0254 / 16 }
+
+function isRounded(typed: Typed, to: UnitSystem): boolean {
+  if (typed.text.trim() === '') return false
+  if (typed.system !== to) return true
+  const read = parseQuantity(typed.text, 'length', { system: typed.system })
+  const steps = read.ok ? read.value / finest[to] : 0
+  return Math.abs(steps - Math.round(steps)) > 1e-6
+}
+
+/** Whether any length is shown rounded: converted, or typed finer than it is shown. */
+export function isShownRounded({ parts, stock, kerf, endTrim }: TypedCutList, system: UnitSystem) {
   const lengths = [...parts, ...stock].map((row) => cellOf(row, 'length'))
-  return [...lengths, kerf, endTrim].some((typed) => typed.text && typed.system !== system)
+  return [...lengths, kerf, endTrim].some((typed) => isRounded(typed, system))
 }
 
 /** Builds a row from texts in the order of its columns. */

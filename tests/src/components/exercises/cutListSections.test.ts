@@ -1,5 +1,9 @@
 import { describe, expect, it } from 'vitest'
-import { sectionOf, showSection } from '../../../../src/components/exercises/cutListSections'
+import {
+  nameSections,
+  sectionOf,
+  showSection,
+} from '../../../../src/components/exercises/cutListSections'
 
 describe('sections of a cut list', () => {
   // What the sizes measure dry: PS 20, American Softwood Lumber Standard, in whole millimetres.
@@ -25,5 +29,14 @@ describe('sections of a cut list', () => {
   it('takes any words, in capitals or not', () => {
     expect(sectionOf('  Round  75 ', 'metric')).toBe(sectionOf('round 75', 'imperial'))
     expect(sectionOf('', 'metric')).toBe('')
+  })
+
+  it('names them in a sentence as the reader does', () => {
+    const parts = ['38×89', 'round 75', ''].map((section) => ({
+      ...{ label: 'Rail', lengthMm: 900, count: 1, section },
+    }))
+    const sentence = 'The 38×89 stock you have is not enough for all its parts.'
+    expect(nameSections(sentence, { parts }, 'imperial')).toBe(sentence.replace('38×89', '2x4'))
+    expect(nameSections(sentence, { parts }, 'metric')).toBe(sentence)
   })
 })

@@ -3,7 +3,7 @@ import { cutListAtOnce } from '../../../../shared/cutlist/solveCutList'
 import { initialCutList } from '../../../../src/components/exercises/cutListInitial'
 import { readCutList } from '../../../../src/components/exercises/cutListReading'
 import {
-  isConverted,
+  isShownRounded,
   isUntouched,
   rowOf,
   showTyped,
@@ -42,9 +42,19 @@ describe('what is typed into a cut list', () => {
     expect(isUntouched(rowOf('stock', 'a', ['38×89'], 'metric'), 'stock')).toBe(true)
   })
 
+  it.each([
+    ['35-3/4', 'imperial', false],
+    ['35-23/32', 'imperial', true],
+    ['895.5', 'metric', false],
+    ['895.55', 'metric', true],
+  ] as const)('knows that %s in %s is shown rounded: %s', (text, system, rounded) => {
+    const list = { ...initialCutList(system), endTrim: { text, system } }
+    expect(isShownRounded(list, system)).toBe(rounded)
+  })
+
   it.each(['metric', 'imperial'] as const)('starts from a list that can be cut, %s', (system) => {
     const list = initialCutList(system)
-    expect(isConverted(list, system)).toBe(false)
+    expect(isShownRounded(list, system)).toBe(false)
     const { request, errors } = readCutList(list, system)
     expect(errors).toEqual({})
     expect(request?.parts[0]?.section).toBe('89×89')
