@@ -162,7 +162,10 @@ describe('GET media/videos/:videoId/file', () => {
     const ofLesson = `/api/courses/${course.slug}/lessons/${course.lesson.key}/poster`
     const picture = await agent.get(ofLesson).expect(200)
     expect(picture.headers).toMatchObject({ 'cache-control': 'private, no-cache' })
-    await agent.get(ofLesson).set('If-None-Match', picture.headers['etag'] as string).expect(304)
+    await agent
+      .get(ofLesson)
+      .set('If-None-Match', picture.headers['etag'] as string)
+      .expect(304)
     await db.insert(kitTicks).values({ userId: learner.id, kitItemId: kit[0]!.id })
     await agent.get(file).expect(403)
     await db.insert(kitTicks).values({ userId: learner.id, kitItemId: kit[1]!.id })
