@@ -129,7 +129,8 @@ export function drawDiagonalsSheet(input: CalculatorSheetInput): CalculatorSheet
   dimensionColumn(drawing, a[1], d[1], Math.min(a[0], d[0]) - 18, left, width.text, width)
   const lines = captionLines(input, shape)
   const first = c[1] + (narrow ? 38 : 46)
-  const start = Math.min(a[0], d[0])
+  const longest = Math.max(...lines.map(({ text }) => drawing.textWidth(text)))
+  const start = Math.max(10, Math.min(a[0], d[0], drawing.width - longest - 10))
   lines.forEach(({ text, style }, index) => drawing.text(start, first + index * 20, text, style))
   const isLeaning = !shape.isSquare && shape.first !== shape.second
   const note = describeScale(corners.isStretched, isLeaning)

@@ -88,6 +88,14 @@ function caption(drawing: Drawing, section: FallSection): number {
   return 30
 }
 
+/** Words in a row, or in two where one is too long for the sheet. */
+function breakLine(drawing: Drawing, words: string[]): string[] {
+  const join = (some: string[]) => some.join('  ·  ')
+  if (drawing.textWidth(join(words)) < drawing.width - 16) return [join(words)]
+  const half = Math.ceil(words.length / 2)
+  return [join(words.slice(0, half)), join(words.slice(half))]
+}
+
 /** The other ways to say it and the verdict; gives the height the sheet then needs. */
 function drawLines(
   drawing: Drawing,
@@ -99,8 +107,15 @@ function drawLines(
   const said = lastLine(input)
   let base = row
   // The one way that was given stands on the surface already.
-  if (ways.length > 1) {
-    drawing.text(middle, base, ways.map(({ text }) => text).join('  ·  '), 'vsub', 'middle')
+  const lines =
+    ways.length > 1
+      ? breakLine(
+          drawing,
+          ways.map(({ text }) => text),
+        )
+      : []
+  for (const line of lines) {
+    drawing.text(middle, base, line, 'vsub', 'middle')
     base += 21
   }
   if (said) {

@@ -140,7 +140,7 @@ function drawCone(drawing: Drawing, input: CalculatorSheetInput, verdict: Consis
   drawing.within(frame, () => {
     drawHeap(drawing, drop)
     const figure = slumpM ? lengthFigure(input, 'slump', slumpM) : { text: '', chalk: false }
-    const column = drawing.x(230)
+    const column = Math.min(drawing.x(230), drawing.width - drawing.textWidth(figure.text) - 18)
     if (figure.text)
       dimensionColumn(
         drawing,

@@ -66,9 +66,11 @@ function readPitch(input: CalculatorSheetInput): Pitch | null {
   }
 }
 
-/** True to its angle as long as both sides can be seen. */
-function placeWedge(angle: number, narrow: boolean): Wedge {
+/** True to its angle as long as both sides can be seen; the figure beside the rise keeps its room. */
+function placeWedge(drawing: Drawing, { angle, rise }: Pitch, narrow: boolean): Wedge {
+  const beside = drawing.textWidth(rise?.text ?? '') + (narrow ? 36 : 46)
   const room = narrow ? { width: 190, height: 130 } : { width: 430, height: 210 }
+  room.width = Math.min(room.width, drawing.width - (narrow ? 66 : 130) - beside)
   const slope = Math.tan(angle)
   const width = Math.max(12, Math.min(room.width, room.height / slope))
   const left = (narrow ? 66 : 130) + (room.width - width) / 2
@@ -125,10 +127,10 @@ export function drawPitchSheet(input: CalculatorSheetInput): CalculatorSheet | n
   const pitch = readPitch(input)
   if (!pitch) return null
   const narrow = input.size === 'narrow'
-  const wedge = placeWedge(pitch.angle, narrow)
+  const drawing = new Drawing(narrow ? 326 : 720, 0, undefined, narrow ? 12 : 14)
+  const wedge = placeWedge(drawing, pitch, narrow)
   const { left, right, top, base } = wedge
   const row = base + (narrow ? 26 : 32)
-  const drawing = new Drawing(narrow ? 326 : 720, 0, undefined, narrow ? 12 : 14)
   drawing.coloured(() =>
     drawing.polygon(
       [

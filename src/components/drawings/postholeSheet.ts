@@ -77,7 +77,7 @@ export function drawPostholeSheet(input: CalculatorSheetInput): CalculatorSheet 
   const [titleLeft, indent] = [narrow ? 10 : 24, narrow ? 22 : 36]
   drawing.text(titleLeft, 22, 'Section', 'vtitle')
   if (note) drawing.text(indent + drawing.textWidth('Section'), 22, note, 'vsub')
-  const low = drawHoleSection(drawing, hole, narrow ? 128 : 210, 96)
+  const low = drawHoleSection(drawing, hole, narrow ? 128 : 190, 96)
   if (narrow) {
     drawing.text(titleLeft, low + 34, 'Plan', 'vtitle')
     const plan = drawHolePlan(drawing, hole, 62, low + 46)

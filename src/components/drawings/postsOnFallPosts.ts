@@ -116,9 +116,10 @@ export function drawPositions(drawing: Drawing, posts: Post[], row: number): voi
   let free = -Infinity
   for (const { x, at } of posts) {
     const half = drawing.textWidth(at) / 2
-    if (x - half < free) continue
+    const middle = Math.min(x, drawing.width - half - 4)
+    if (middle - half < free) continue
     drawing.stroke(x, row - 22, x, row - 14, 'p1b')
-    drawing.text(x, row, at, 'tx', 'middle')
-    free = x + half + 8
+    drawing.text(middle, row, at, 'tx', 'middle')
+    free = middle + half + 8
   }
 }

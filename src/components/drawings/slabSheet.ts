@@ -41,12 +41,19 @@ function layOutPlan(slab: Slab, drawing: Drawing): Plan {
   const narrow = slab.input.size === 'narrow'
   const left = drawing.textWidth(slab.width.text) + (narrow ? 34 : 56)
   const room = { width: drawing.width - left - (narrow ? 18 : 70), height: narrow ? 120 : 220 }
-  const scale = Math.min(room.width / slab.lengthM, room.height / slab.widthM)
+  const figure = drawing.textWidth(slab.length.text) + 14
+  // A length too short for its figure has it beside the plan, and leaves it room there.
+  const beside = drawing.width - left - figure
+  const fitting = Math.min(room.width / slab.lengthM, room.height / slab.widthM)
+  const isShort = slab.lengthM * fitting <= figure
+  const scale = isShort ? Math.min(fitting, beside / slab.lengthM) : fitting
   const width = Math.max(LEAST_SIDE, slab.lengthM * scale)
   const height = Math.max(LEAST_SIDE, slab.widthM * scale)
   const stretched =
     slab.widthM * scale < LEAST_SIDE ? 'Width' : slab.lengthM * scale < LEAST_SIDE ? 'Length' : ''
-  return { left: left + (room.width - width) / 2, top: narrow ? 50 : 70, width, height, stretched }
+  const middle = (room.width - width) / 2
+  const from = left + (isShort ? Math.min(middle, beside - width) : middle)
+  return { left: from, top: narrow ? 50 : 70, width, height, stretched }
 }
 
 function drawPlan(drawing: Drawing, slab: Slab, plan: Plan): void {

@@ -54,8 +54,10 @@ function layOutForm(
   input: CalculatorSheetInput,
   [longM, shortM]: readonly [number, number],
   triangle: Triangle | null,
+  up: Figure,
 ): FormArea {
-  const upright = triangle ? drawing.textWidth(triangle.short.short) + 16 : 0
+  const upright =
+    16 + Math.max(...[triangle?.short.short ?? '', up.text].map((text) => drawing.textWidth(text)))
   const least = Math.max(LEAST_LEG[input.size], (upright * 4) / 3)
   const wide = input.size === 'wide'
   const room = wide ? { width: 530, height: 240 } : { width: 238, height: 124 }
@@ -67,7 +69,7 @@ function layOutForm(
     left: (wide ? 92 : 44) + (room.width - width) / 2,
     top: wide ? 62 : 40,
     width,
-    height: Math.max(height, wide ? 60 : 44),
+    height: Math.max(height, wide ? 60 : 44, upright),
     scale,
     board: wide ? 8 : 4,
     cutAcross: longM * scale > width + 1,
@@ -123,7 +125,9 @@ export function drawSquareSheet(input: CalculatorSheetInput): CalculatorSheet | 
   const [longM, shortM] = [Math.max(sideA, sideB), Math.min(sideA, sideB)]
   const triangle = readTriangle(input)
   const drawing = new Drawing(wide ? 720 : 326, 0, undefined, wide ? 14 : 12)
-  const form = layOutForm(drawing, input, [longM, shortM], triangle)
+  const across = sideText(input, longName, longM)
+  const up = sideText(input, shortName, shortM)
+  const form = layOutForm(drawing, input, [longM, shortM], triangle, up)
   const isCut = form.cutAcross || form.cutUp
   const question = questionFor(input.asked)
   const base = form.top + form.height + form.board
@@ -131,8 +135,6 @@ export function drawSquareSheet(input: CalculatorSheetInput): CalculatorSheet | 
   drawing.height = height
   drawForm(drawing, form)
   if (triangle) drawTriangle(drawing, form, triangle, wide)
-  const across = sideText(input, longName, longM)
-  const up = sideText(input, shortName, shortM)
   const right = form.left + form.width
   const above = form.top - form.board - (wide ? 28 : 20)
   const column = right + form.board + (wide ? 34 : 20)
