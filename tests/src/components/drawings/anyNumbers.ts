@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { expect } from 'vitest'
 import { findCalculator, runCalculator, showInput } from '../../../../shared/calculators'
-import type { CalculatorInput } from '../../../../shared/calculators/calculator'
+import type { CalculatorInput, QuantityInput } from '../../../../shared/calculators/calculator'
 import type { UnitSystem } from '../../../../shared/contracts/exercises'
 import type {
   CalculatorSheetSize,
@@ -12,15 +12,24 @@ import { findFaults } from './labelFaults'
 const sizes: CalculatorSheetSize[] = ['wide', 'narrow']
 const systems: UnitSystem[] = ['metric', 'imperial']
 /** Steps of a scale on which ten times as much is always as far. */
-const STEPS = 1000
+const STEPS = 10_000
+/** Any step of that scale, every one as often as another. */
+export const anyStep = fc.noBias(fc.integer({ min: 0, max: STEPS }))
+
+/** The number at a step between the bounds of an input: a fiftieth of the steps is each of its ends; counts are whole. */
+export function numberAt({ min, max, quantity }: QuantityInput, step: number): number {
+  const least = Math.max(min, max / 100_000)
+  if (step < STEPS * 0.02) return min
+  if (step > STEPS * 0.98) return max
+  const value = least * (max / least) ** (step / STEPS)
+  return quantity === 'count' ? Math.round(value) : value
+}
 
 function textOf(input: CalculatorInput, step: number, system: UnitSystem): string {
   if (input.quantity === 'choice')
     return input.choices[step % input.choices.length]?.value ?? input.initial[system]
   if (input.optional && step % 3 === 0) return ''
-  const least = Math.max(input.min, input.max / 100_000)
-  const value = step < 20 ? input.min : least * (input.max / least) ** (step / STEPS)
-  return showInput(input, value, system)
+  return showInput(input, numberAt(input, step), system)
 }
 
 /**
@@ -31,11 +40,13 @@ export function expectLabelsApart(id: string, draw: DrawCalculatorSheet, runs = 
   const calculator = findCalculator(id)
   if (!calculator) throw new Error(`No calculator ${id}`)
   const names = [undefined, ...calculator.outputs.map(({ name }) => name)]
-  const step = fc.integer({ min: 0, max: STEPS })
   let drawn = 0
   fc.assert(
     fc.property(
-      fc.array(step, { minLength: calculator.inputs.length, maxLength: calculator.inputs.length }),
+      fc.array(anyStep, {
+        minLength: calculator.inputs.length,
+        maxLength: calculator.inputs.length,
+      }),
       fc.constantFrom(...sizes),
       fc.constantFrom(...systems),
       fc.constantFrom(...names),
