@@ -42,7 +42,7 @@ export function mixSteps(values: Values, outputs: Values, system: UnitSystem): S
       label: 'Water to cement, about',
       formula: `weight of water ÷ (weight of bag × ${writer.number(CEMENT_SHARE)})`,
       numbers: `${writer.show(added * 1000, 'mass')} ÷ (${writer.show(bag.mass, 'mass')} × ${writer.number(CEMENT_SHARE)})`,
-      result: writer.number(numberOf(outputs, 'waterCementRatio')),
+      result: writer.show(numberOf(outputs, 'waterCementRatio'), 'ratio'),
       output: 'waterCementRatio',
     },
     ...cone,

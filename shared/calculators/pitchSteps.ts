@@ -65,8 +65,8 @@ export function pitchSteps(values: Values, outputs: Values, system: UnitSystem):
     {
       label: 'Ratio, rise to run',
       formula: FIRST[given] ?? '',
-      numbers: first[given]?.() ?? '',
-      result: `${ratio}, ${writer.show(output('ratio'), 'ratio', { unit: '1:n' })}`,
+      numbers: `${first[given]?.() ?? ''} = ${ratio}`,
+      result: writer.show(output('ratio'), 'ratio', { unit: '1:n' }),
       output: 'ratio',
     },
     ...said.filter((step) => step.output !== given),

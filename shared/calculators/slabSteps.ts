@@ -13,7 +13,8 @@ export function slabSteps(values: Values, outputs: Values, system: UnitSystem): 
   const yieldUnit = { unit: system === 'metric' ? 'L' : 'ft³' }
   const fall = optionalNumber(values, 'fall') ?? 0
   const slopeUnit = { unit: system === 'metric' ? 'mm/m' : 'in/ft' }
-  const volumeText = (name: string) => writer.show(output(name), 'volume')
+  const volumeUnit = { unit: system === 'metric' ? 'm³' : 'yd³' }
+  const volumeText = (name: string) => writer.show(output(name), 'volume', volumeUnit)
   const sides = ['length', 'width'].map((name) => writer.large(numberOf(values, name))).join(' × ')
   const bagsText = writer.number(output('bags'))
   const mean: Step[] =
