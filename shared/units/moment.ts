@@ -27,5 +27,11 @@ export function formatDay(iso: string): string {
   return year === new Date().getFullYear() ? day : `${day} ${year}`
 }
 
+/** A time of day in the person's own zone: `08:05`, `15:45`. */
+export function formatClock(date: Date): string {
+  const two = (value: number) => String(value).padStart(2, '0')
+  return `${two(date.getHours())}:${two(date.getMinutes())}`
+}
+
 /** A number of things in words: `1 lesson`, `3 lessons`. */
 export const countOf = (n: number, one: string, many = `${one}s`) => `${n} ${n === 1 ? one : many}`

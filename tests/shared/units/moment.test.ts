@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it, vi } from 'vitest'
-import { countOf, formatDay, formatDuration, formatMoment } from '../../../shared/units/moment'
+import { countOf, formatClock, formatDay, formatDuration, formatMoment } from '../../../shared/units/moment'
 
 describe('formatDay', () => {
   it('reads as the platform writes the same day in British English', () => {
@@ -45,6 +45,11 @@ describe('moments and lengths of time', () => {
     [37 * 60_000, '37 min'],
     [209 * 60_000, '3 h 29 min'],
   ])('%i ms lasts %s', (ms, text) => expect(formatDuration(ms)).toBe(text))
+
+  it('tells the time of day with two figures each', () => {
+    expect(formatClock(new Date(2026, 4, 12, 8, 5))).toBe('08:05')
+    expect(formatClock(new Date(2026, 4, 12, 15, 45, 59))).toBe('15:45')
+  })
 
   it('counts one and many', () => {
     expect([countOf(1, 'lesson'), countOf(0, 'lesson'), countOf(2, 'try', 'tries')]).toEqual([
