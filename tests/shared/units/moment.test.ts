@@ -1,6 +1,12 @@
 import fc from 'fast-check'
 import { describe, expect, it, vi } from 'vitest'
-import { countOf, formatClock, formatDay, formatDuration, formatMoment } from '../../../shared/units/moment'
+import {
+  countOf,
+  formatClock,
+  formatDay,
+  formatDuration,
+  formatMoment,
+} from '../../../shared/units/moment'
 
 describe('formatDay', () => {
   it('reads as the platform writes the same day in British English', () => {
