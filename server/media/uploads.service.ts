@@ -1,7 +1,7 @@
 import type { IncomingMessage } from 'node:http'
 import { Readable } from 'node:stream'
 import type { ReadableStream } from 'node:stream/web'
-import { ERRORS, MemoryLocker, Server } from '@tus/server'
+import { MemoryLocker, Server } from '@tus/server'
 import { maxVideoBytes } from '../../shared/contracts/media'
 import type { Actor, Thing } from '../../shared/contracts/policies'
 import { accessBenchRow, accessCourse } from '../courses/access.service'
@@ -133,7 +133,9 @@ export function createUploads({
       return {}
     },
     async onResponseError(_request, error) {
-      const isFull = error === ERRORS.FILE_WRITE_ERROR && (await findFree()) < reservedBytes
+      // The library tells a failed write apart only by the object it throws, which may be a copy of its own.
+      const status = 'status_code' in error ? error.status_code : 500
+      const isFull = status >= 500 && (await findFree()) < reservedBytes
       return isFull ? { status_code: 507, body: '' } : undefined
     },
   })
