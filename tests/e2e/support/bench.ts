@@ -1,6 +1,8 @@
 import { readFileSync } from 'node:fs'
 import type { APIResponse, Page } from '@playwright/test'
 import type { BenchCourse, BenchLesson, BenchStop } from '../../../shared/contracts/benchCourses'
+import type { OwnCalculator } from '../../../shared/contracts/ownCalculators'
+import { barrows } from '../../shared/ownCalculators/definitions'
 import { captions, film, filmName } from './films'
 import { newWord } from './people'
 import { expect } from './watched'
@@ -47,6 +49,15 @@ export async function makeCourse(page: Page, lessons: string[]) {
     course = await send<BenchCourse>(page, 'POST', `bench/stages/${stageId}/lessons`, { title })
   }
   return course
+}
+
+/** A calculator of the course's own that could be kept as it is. */
+export async function makeOwnCalculator(page: Page, courseId: number) {
+  const response = await ask(page, 'POST', `bench/courses/${courseId}/own-calculators`, {
+    headers: { 'Idempotency-Key': crypto.randomUUID() },
+    data: { definition: barrows() },
+  })
+  return (await response.json()) as OwnCalculator
 }
 
 const base64 = (text: string | number) => Buffer.from(String(text)).toString('base64')
