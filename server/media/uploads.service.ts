@@ -1,13 +1,14 @@
 import type { IncomingMessage } from 'node:http'
 import { Readable } from 'node:stream'
 import type { ReadableStream } from 'node:stream/web'
-import { MemoryLocker, Server } from '@tus/server'
+import { Server } from '@tus/server'
 import { maxVideoBytes } from '../../shared/contracts/media'
 import type { Actor, Thing } from '../../shared/contracts/policies'
 import { accessBenchRow, accessCourse } from '../courses/access.service'
 import { findLessonToFilm } from '../courses/lessonVideos.service'
 import { notFound } from '../errors'
 import { findFreeBytes, reservedBytes } from './diskSpace'
+import { createUploadLocks } from './uploadLocks'
 import { refusals } from './uploadRefusals'
 import { keptMs, uploadStore, type UploadNote } from './uploadStore'
 import { addUploadedVideo, findUploaded } from './videos.service'
@@ -123,7 +124,7 @@ export function createUploads({
   const tus = new Server({
     path: '/api/uploads',
     datastore: uploadStore.makeDataStore(),
-    locker: new MemoryLocker(),
+    locker: createUploadLocks(uploadStore.folder),
     maxSize: maxVideoBytes,
     relativeLocation: true,
     onUploadCreate: (request) => Promise.resolve({ metadata: notes.get(request as Request) ?? {} }),
