@@ -7,7 +7,11 @@ import type {
   OwnQuantity,
   OwnSlip,
 } from '../../../shared/contracts/ownCalculators'
+import { fieldUnit } from '../../../shared/calculators/fields'
+import type { UnitSystem } from '../../../shared/contracts/exercises'
 import { ownCalculatorLimits } from '../../../shared/ownCalculators/limits'
+import { parseQuantity } from '../../../shared/units/parse'
+import { unitIn } from '../../../shared/units/unit'
 import { refuseName } from '../../../shared/ownCalculators/vocabulary'
 import type { Typed } from './exerciseDrafts'
 
@@ -204,6 +208,13 @@ export const newSlip = ({ outputs }: Pick<OwnDraft, 'outputs'>): OwnSlip => ({
   sentence: '',
   wayBack: '',
 })
+
+/** The system of the unit that something was written with; metric where there is none, or it is of both. */
+export function systemOfText(output: OwnOutput, text: string): UnitSystem {
+  const options = { system: 'metric', defaultUnit: fieldUnit(output, 'metric') } as const
+  const read = parseQuantity(text, output.quantity, options)
+  return read.ok && unitIn(read.unit, 'metric') !== read.unit ? 'imperial' : 'metric'
+}
 
 /** A calculator to begin with: one number in, one out, and two examples to work. */
 export function newOwnDefinition(title: string): OwnCalculatorDefinition {

@@ -12,6 +12,7 @@ import {
   relabel,
   renameInDraft,
   suggestName,
+  systemOfText,
   takeOutNamed,
 } from '../../../../src/components/exercises/ownCalculatorDrafts'
 import { barrows } from '../../../shared/ownCalculators/definitions'
@@ -116,6 +117,19 @@ describe('bounds that cannot be read', () => {
   })
   it('bound nothing while it is tried out', () => {
     expect(ownCalculatorDefinitionSchema.parse(readOwnDraft(draft())).inputs[1]?.max).toBe(1e12)
+  })
+})
+
+describe('systemOfText', () => {
+  const loose = { name: 'loose', label: 'Loose', quantity: 'volume' as const, expression: '1 m^3' }
+  it.each([
+    ['0.875 ft³', 'imperial'],
+    ['24.8 L', 'metric'],
+    ['0.9', 'metric'],
+    ['', 'metric'],
+    ['much', 'metric'],
+  ])('reads “%s” as %s', (text, system) => {
+    expect(systemOfText(loose, text)).toBe(system)
   })
 })
 
