@@ -224,6 +224,25 @@ test('nothing typed is lost when two write the same calculator, nor where a boun
   })
 })
 
+test('a calculator of another course is copied, and one that no stop needs is taken off', async ({
+  page,
+}) => {
+  await comeInstructor(page)
+  const from = await makeCourse(page, ['The trench'])
+  const to = await makeCourse(page, ['The drain'])
+  await makeOwnCalculator(page, from.id)
+  await page.goto(`/bench/courses/${to.id}/calculators`)
+  await expect(page.getByText('None yet. Write down what is measured')).toBeVisible()
+  await page.getByRole('button', { name: `Copy Barrows of stone from ${from.title}` }).click()
+  await page.getByRole('heading', { name: 'Barrows of stone', level: 1 }).waitFor()
+  await expect(page.getByRole('link', { name: to.title })).toBeVisible()
+  await keep(page, 1).click()
+  await expect(page.getByText('Version 1 says just this')).toBeVisible()
+  await page.getByRole('button', { name: 'Take it off the bench' }).click()
+  await page.getByRole('button', { name: 'Take it off', exact: true }).click()
+  await expect(page.getByText('None yet. Write down what is measured')).toBeVisible()
+})
+
 for (const width of [1440, 360]) {
   test(`axe finds nothing on own calculators at ${width} px in either theme, nor sideways scroll`, async ({
     page,
