@@ -140,7 +140,7 @@ function readJson(
     if (value === null) continue
     if (typeof value === 'string') texts[name] = value
     else if (typeof value === 'boolean') texts[name] = value ? 'yes' : 'no'
-    else if (Array.isArray(value))
+    else if (Array.isArray(value) && input.quantity !== 'choice' && input.isList)
       texts[name] = value.map((one) => writeJson(one, input)).join('; ')
     else if (typeof value !== 'number')
       return failure(name, `${input.label} must be a number or a text with a unit.`)

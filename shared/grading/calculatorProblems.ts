@@ -1,4 +1,4 @@
-import type { Calculator, CalculatorInput } from '../calculators/calculator'
+import type { Calculator, CalculatorInput, Values } from '../calculators/calculator'
 import { checkBounds, readInput } from '../calculators/readInputs'
 import { fieldUnit, runCalculator, showInput } from '../calculators/index'
 import type { CalculatorDefinition, ExerciseInput, UnitSystem } from '../contracts/exercises'
@@ -133,8 +133,10 @@ function findDrawProblems(
   /** Nobody reads the steps of what is only tried out. */
   const tried = { ...calculator, steps: () => [] }
   const draws = [...drawCorners(calculator, definition), ...drawSeeds(calculator, definition)]
+  const runs: TriedRun[] = []
   for (const { texts, system } of draws) {
     const run = runCalculator(tried, texts, system)
+    if (run.ok) runs.push({ texts, system, values: run.values })
     if (!run.ok) {
       const [name = '', message = ''] = Object.entries(run.errors)[0] ?? []
       const numbers = describeRanged(definition, texts)
@@ -151,24 +153,32 @@ function findDrawProblems(
   }
   return [
     ...findToleranceProblems(calculator, definition),
-    ...findTieProblems(tried, definition, draws),
+    ...findTieProblems(tried, definition, runs),
   ]
 }
+
+interface TriedRun {
+  texts: Record<string, string>
+  system: UnitSystem
+  values: Values
+}
+/** Each is worked a dozen times over, so fewer are tried. */
+const TRIED_FOR_TIES = 20
 
 /** Learners whose answer a hair decides: two careful people would differ. */
 function findTieProblems(
   calculator: Calculator,
   definition: CalculatorDefinition,
-  draws: { texts: Record<string, string>; system: UnitSystem }[],
+  runs: TriedRun[],
 ): ExerciseProblem[] {
-  const ties = draws.filter(({ texts, system }) => {
-    const run = runCalculator(calculator, texts, system)
-    return run.ok && findNearTie(calculator, run.values, definition.asked, system) !== undefined
-  })
+  const tried = runs.slice(0, TRIED_FOR_TIES)
+  const ties = tried.filter(
+    ({ values, system }) => findNearTie(calculator, values, definition.asked, system) !== undefined,
+  )
   if (ties.length === 0) return []
   const numbers = describeRanged(definition, ties[0]?.texts ?? {})
   const of = numbers === '' ? '' : `, as with ${numbers}`
-  const message = `${String(ties.length)} of ${String(draws.length)} tried learners stand on an edge${of}: a hair more or less gives another answer. Move the range or its step.`
+  const message = `${String(ties.length)} of ${String(tried.length)} tried learners stand on an edge${of}: a hair more or less gives another answer. Move the range or its step.`
   return [mend('definition.asked', message)]
 }
 

@@ -92,6 +92,12 @@ const table: Record<string, [Who, Body]> = {
     { version: 1, name: 'Check', atMs: 1, isRequired: true, exercise: null },
   ],
   'PUT /bench/captions/:trackId/cues': ['owner', { version: 1, cues: [] }],
+  'POST /bench/courses/:courseId/own-calculators': ['owner', { definition: {} }],
+  'PATCH /bench/courses/:courseId/own-calculators/:ownKey': [
+    'owner',
+    { version: 1, definition: {}, keepsVersion: false },
+  ],
+  'POST /bench/courses/:courseId/own-calculator-copies': ['owner', { fromCourseId: 1, key: 'a' }],
 }
 /** These take no JSON: nothing at all, the bytes of a file, or the headers of tus. */
 const withoutJson = [
