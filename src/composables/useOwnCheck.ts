@@ -10,8 +10,11 @@ const pauseMs = 250
  * A definition checked as it is written, beside the page. `sound` is the last one whose fields and formulas
  * could be taken: what there is to try out while something is being mended.
  */
-export function useOwnCheck(definition: () => OwnCalculatorDefinition, first: OwnCheck) {
-  const check = shallowRef(first)
+export function useOwnCheck(
+  definition: () => OwnCalculatorDefinition,
+  opened: { definition: OwnCalculatorDefinition; check: OwnCheck },
+) {
+  const check = shallowRef(opened.check)
   const isPending = ref(false)
   const sound = shallowRef<OwnCalculatorDefinition | null>(null)
   let last = 0
@@ -34,17 +37,16 @@ export function useOwnCheck(definition: () => OwnCalculatorDefinition, first: Ow
     take(checked, found)
     isPending.value = false
   }
-  watch(
-    definition,
-    () => {
-      const number = ++last
-      isPending.value = true
-      clearTimeout(pause)
-      pause = setTimeout(() => void look(number), pauseMs)
-    },
-    { deep: true },
-  )
-  take(copy(), first)
+  function lookSoon() {
+    const number = ++last
+    isPending.value = true
+    clearTimeout(pause)
+    pause = setTimeout(() => void look(number), pauseMs)
+  }
+  watch(definition, lookSoon, { deep: true })
+  take(opened.definition, opened.check)
+  /** What was typed before a reload and not sent yet is on this device only. */
+  if (JSON.stringify(copy()) !== JSON.stringify(opened.definition)) lookSoon()
   onScopeDispose(() => {
     last++
     clearTimeout(pause)
