@@ -14,6 +14,7 @@ import {
 import { createSessionCookie, startTestApp, type TestApp } from '../../support/app'
 import { ask, createScene, reply } from './fenceScene'
 import { Line } from './line'
+import { patience } from '../../support/patience'
 
 let app: TestApp
 beforeAll(async () => {
@@ -85,7 +86,7 @@ describe('a change in a room', () => {
     await line.join(elsewhere.room)
     await ask(here.asker, here.path)
     await ask(elsewhere.asker, elsewhere.path, { title: 'Ours' })
-    await vi.waitFor(() => expect(line.events).toHaveLength(1))
+    await vi.waitFor(() => expect(line.events).toHaveLength(1), patience)
     expect(line.events[0]?.thread.title).toBe('Ours')
   })
 
@@ -160,18 +161,20 @@ describe('who is here and who writes', () => {
       count: 2,
     })
     visitor.close()
-    await vi.waitFor(() => expect(first.presences.at(-1)?.count).toBe(1))
+    await vi.waitFor(() => expect(first.presences.at(-1)?.count).toBe(1), patience)
     second.close()
     const anke = await lineOf(scene.people.neighbour)
     await anke.join(scene.room)
-    await vi.waitFor(() =>
-      expect(first.presences.at(-1)?.here.map((person) => person.name)).toEqual([
-        'Jo Varga',
-        'Anke',
-      ]),
+    await vi.waitFor(
+      () =>
+        expect(first.presences.at(-1)?.here.map((person) => person.name)).toEqual([
+          'Jo Varga',
+          'Anke',
+        ]),
+      patience,
     )
     await anke.send(clientEvents.leaveRoom, scene.room)
-    await vi.waitFor(() => expect(first.presences.at(-1)?.here).toHaveLength(1))
+    await vi.waitFor(() => expect(first.presences.at(-1)?.here).toHaveLength(1), patience)
   })
 
   it(
@@ -185,7 +188,7 @@ describe('who is here and who writes', () => {
       await writer.join(scene.room)
       const word = { ...scene.room, questionId: null, isWriting: true }
       expect(await writer.send(clientEvents.writing, word)).toEqual({ ok: true, data: {} })
-      await vi.waitFor(() => expect(reader.writings).toHaveLength(1))
+      await vi.waitFor(() => expect(reader.writings).toHaveLength(1), patience)
       expect(reader.writings[0]).toMatchObject({ isWriting: true, person: { name: 'Anke' } })
       expect(writer.writings).toEqual([])
       const saidAt = performance.now()
@@ -196,7 +199,7 @@ describe('who is here and who writes', () => {
       expect(reader.writings[1]?.isWriting).toBe(false)
       await writer.send(clientEvents.writing, word)
       writer.close()
-      await vi.waitFor(() => expect(reader.writings.at(-1)?.isWriting).toBe(false))
+      await vi.waitFor(() => expect(reader.writings.at(-1)?.isWriting).toBe(false), patience)
       expect(reader.writings).toHaveLength(4)
     },
   )
@@ -243,7 +246,7 @@ describe('what a line may do', () => {
       error: { code: 'sign-in-first' },
     })
     await ask(scene.asker, scene.path)
-    await vi.waitFor(() => expect(line.events).toHaveLength(1))
+    await vi.waitFor(() => expect(line.events).toHaveLength(1), patience)
   })
 
   it.each([

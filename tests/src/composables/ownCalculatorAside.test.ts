@@ -4,6 +4,7 @@ import type * as aside from '../../../src/composables/ownCalculatorAside'
 import type { Exercise } from '../../../shared/contracts/exercises'
 import { barrows, barrowsWithFormula } from '../../shared/ownCalculators/definitions'
 import { FakeWorker } from './fakeWorker'
+import { patience } from '../../support/patience'
 
 let performAside: typeof aside.performAside
 let judgeAside: typeof aside.judgeAside
@@ -37,7 +38,7 @@ describe('performAside', () => {
     await run()
     FakeWorker.behaviour = 'spins'
     const spun = run().catch((error: unknown) => error)
-    await vi.waitFor(() => expect(FakeWorker.opened[0]?.isEnded).toBe(true))
+    await vi.waitFor(() => expect(FakeWorker.opened[0]?.isEnded).toBe(true), patience)
     FakeWorker.behaviour = 'works'
     expect(await spun).toMatchObject({ message: 'the task took too long' })
     expect((await run()).ok).toBe(true)

@@ -4,6 +4,7 @@ import type { UnitSystem } from '../../../shared/contracts/exercises'
 import { barrows, barrowsWithFormula } from '../../shared/ownCalculators/definitions'
 import type * as composable from '../../../src/composables/useCalculatorRun'
 import { FakeWorker } from './fakeWorker'
+import { patience } from '../../support/patience'
 
 let useCalculatorRun: typeof composable.useCalculatorRun
 beforeEach(async () => {
@@ -52,18 +53,22 @@ describe('useCalculatorRun', () => {
       barrows().inputs.map(({ name }) => name),
     )
     expect([run.value, isPending.value]).toEqual([null, true])
-    await vi.waitFor(() => expect(run.value).toMatchObject({ ok: true, outputs: { barrows: 15 } }))
+    await vi.waitFor(
+      () => expect(run.value).toMatchObject({ ok: true, outputs: { barrows: 15 } }),
+      patience,
+    )
     expect(isPending.value).toBe(false)
 
     texts.value = { ...ownTexts, length: '3 m' }
     await nextTick()
     expect(isPending.value).toBe(true)
     expect(run.value).toMatchObject({ outputs: { barrows: 15 } })
-    await vi.waitFor(() => expect(run.value).toMatchObject({ outputs: { barrows: 4 } }))
+    await vi.waitFor(() => expect(run.value).toMatchObject({ outputs: { barrows: 4 } }), patience)
 
     system.value = 'imperial'
-    await vi.waitFor(() =>
-      expect(run.value?.ok && run.value.steps.at(-1)?.result).toBe('794\u00a0lb'),
+    await vi.waitFor(
+      () => expect(run.value?.ok && run.value.steps.at(-1)?.result).toBe('794\u00a0lb'),
+      patience,
     )
   })
 
@@ -73,30 +78,32 @@ describe('useCalculatorRun', () => {
       texts.value = { ...ownTexts, length }
       await Promise.resolve()
     }
-    await vi.waitFor(() => expect(isPending.value).toBe(false))
+    await vi.waitFor(() => expect(isPending.value).toBe(false), patience)
     expect(run.value).toMatchObject({ ok: true, outputs: { barrows: 4 } })
   })
 
   it('says so when a formula takes too long', async () => {
     FakeWorker.behaviour = 'spins'
     const { run } = setUp(own, ownTexts)
-    await vi.waitFor(() =>
-      expect(run.value).toMatchObject({
-        ok: false,
-        errors: { length: 'The formula took too long to work out.' },
-      }),
+    await vi.waitFor(
+      () =>
+        expect(run.value).toMatchObject({
+          ok: false,
+          errors: { length: 'The formula took too long to work out.' },
+        }),
+      patience,
     )
   })
 
   it('follows a change of calculator, and has nothing for one that is not there', async () => {
     const { run, which, face } = setUp(own, { ...slabTexts, ...ownTexts })
-    await vi.waitFor(() => expect(run.value?.ok).toBe(true))
+    await vi.waitFor(() => expect(run.value?.ok).toBe(true), patience)
     which.value = { calculator: 'slab' }
     expect(run.value?.ok).toBe(true)
     which.value = { calculator: 'own:barrows' }
     expect([run.value, face.value]).toEqual([null, undefined])
     const definition = barrowsWithFormula('loose', 'trench +')
     which.value = { calculator: 'own:barrows', own: { key: 'barrows', version: 2, definition } }
-    await vi.waitFor(() => expect(run.value).toMatchObject({ ok: false }))
+    await vi.waitFor(() => expect(run.value).toMatchObject({ ok: false }), patience)
   })
 })

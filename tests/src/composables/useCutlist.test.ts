@@ -6,6 +6,7 @@ import { highsSolver } from '../../../shared/cutlist/highsSolver'
 import { solveCutList } from '../../../shared/cutlist/solveCutList'
 import type { CutNews, CutQuestion } from '../../../src/composables/cutlist.worker'
 import { useCutlist, type CutWorker } from '../../../src/composables/useCutlist'
+import { patience } from '../../support/patience'
 
 const section = '47 × 100'
 const part = (lengthMm: number, count: number) => ({
@@ -81,7 +82,7 @@ describe('useCutlist', () => {
     solve(reactive(worthwhile))
     expect(state.value).toBe('searching')
     const first = list.value!.count
-    await vi.waitFor(() => expect(state.value).toBe('proved'))
+    await vi.waitFor(() => expect(state.value).toBe('proved'), patience)
     expect(first).toBeGreaterThan(12)
     expect(list.value!.count).toBe(12)
     expect(list.value!.proof).toBe('optimal')

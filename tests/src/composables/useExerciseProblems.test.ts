@@ -4,6 +4,7 @@ import type { Exercise } from '../../../shared/contracts/exercises'
 import type { OwnSnapshot } from '../../../shared/contracts/ownCalculators'
 import { barrows, barrowsWithFormula } from '../../shared/ownCalculators/definitions'
 import { FakeWorker } from './fakeWorker'
+import { patience } from '../../support/patience'
 
 beforeEach(() => {
   FakeWorker.reset()
@@ -48,13 +49,14 @@ describe('useExerciseProblems', () => {
     const wrong = ownOf(barrowsWithFormula('loose', 'trench * lenght'))
     const { exercise, blocking } = await setUp(build(wrong, 'loose'))
     expect(blocking()).toEqual([])
-    await vi.waitFor(() =>
-      expect(blocking()).toEqual(['definition.own.definition.outputs.1.expression']),
+    await vi.waitFor(
+      () => expect(blocking()).toEqual(['definition.own.definition.outputs.1.expression']),
+      patience,
     )
     exercise.value = build(ownOf(), 'colour')
-    await vi.waitFor(() => expect(blocking()).toEqual(['definition.asked']))
+    await vi.waitFor(() => expect(blocking()).toEqual(['definition.asked']), patience)
     exercise.value = build(ownOf(), 'loose')
-    await vi.waitFor(() => expect(blocking()).toEqual([]))
+    await vi.waitFor(() => expect(blocking()).toEqual([]), patience)
     exercise.value = null
     expect(blocking()).toEqual([])
   })

@@ -2,6 +2,7 @@ import { beforeEach, describe, expect, it, vi } from 'vitest'
 import { effectScope } from 'vue'
 import type { LessonProgress, ReportProgress } from '../../../shared/contracts/progress'
 import { useWatchedTime } from '../../../src/composables/useWatchedTime'
+import { patience } from '../../support/patience'
 
 const reportProgress = vi.hoisted(() => vi.fn())
 vi.mock('../../../src/api/progress', () => ({
@@ -83,7 +84,10 @@ describe('useWatchedTime', () => {
     localStorage.setItem('gf-watched:7:a-fence/gate', '[[0,9000]]')
     localStorage.setItem('gf-watched:8:a-fence/gate', '[[0,5000]]')
     const { scope } = watch(7)
-    await vi.waitFor(() => expect(localStorage.getItem('gf-watched:7:a-fence/gate')).toBeNull())
+    await vi.waitFor(
+      () => expect(localStorage.getItem('gf-watched:7:a-fence/gate')).toBeNull(),
+      patience,
+    )
     expect(reportProgress).toHaveBeenCalledWith(
       { ...place, lessonKey: 'gate' },
       { intervals: [[0, 9000]], positionMs: 9000 },

@@ -5,6 +5,7 @@ import type { Exercise, LearnerExercise, StopState } from '../../../shared/contr
 import { toLearnerExercise } from '../../../shared/grading'
 import { barrows } from '../../shared/ownCalculators/definitions'
 import { FakeWorker } from './fakeWorker'
+import { patience } from '../../support/patience'
 
 type Worked = Extract<LearnerExercise, { kind: 'calculator' }>
 
@@ -59,7 +60,7 @@ describe('useWorkedExercise with an own calculator', () => {
     expect(asked.value?.label).toBe('Loose stone')
     expect(given.value).toContain('length')
     expect(texts.value['depth']).toBe('150')
-    await vi.waitFor(() => expect(exercises.worked).not.toBeNull())
+    await vi.waitFor(() => expect(exercises.worked).not.toBeNull(), patience)
     expect(exercises.worked).toMatchObject({ calculator: 'own:barrows', asked: 'loose' })
     expect(exercises.worked?.steps.map(({ output, result }) => [output, result])).toEqual([
       ['trench', '0.72\u00a0m³'],
@@ -70,8 +71,8 @@ describe('useWorkedExercise with an own calculator', () => {
   it('says at the field what is wrong with a number of one’s own', async () => {
     const { texts, errors } = await setUp()
     texts.value = { ...texts.value, depth: '9 m' }
-    await vi.waitFor(() => expect(errors.value['depth']).toContain('out of range'))
+    await vi.waitFor(() => expect(errors.value['depth']).toContain('out of range'), patience)
     texts.value = { ...texts.value, depth: '200' }
-    await vi.waitFor(() => expect(errors.value).toEqual({}))
+    await vi.waitFor(() => expect(errors.value).toEqual({}), patience)
   })
 })

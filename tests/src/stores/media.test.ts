@@ -4,6 +4,7 @@ import { maxVideoBytes } from '../../../shared/contracts/media'
 import * as api from '../../../src/api/media'
 import { startVideoUpload, type UploadListener } from '../../../src/api/uploads'
 import { useMediaStore } from '../../../src/stores/media'
+import { patience } from '../../support/patience'
 
 vi.mock('../../../src/api/media')
 vi.mock('../../../src/api/uploads')
@@ -54,7 +55,7 @@ describe('useMediaStore, uploads', () => {
     listener.onCut()
     expect(media.uploads.get(5)?.state).toBe('cut')
     window.dispatchEvent(new Event('online'))
-    await vi.waitFor(() => expect(handle.goOn).toHaveBeenCalledOnce())
+    await vi.waitFor(() => expect(handle.goOn).toHaveBeenCalledOnce(), patience)
     expect(media.uploads.get(5)?.state).toBe('sending')
   })
   it('keeps the sentence of a refusal', async () => {
