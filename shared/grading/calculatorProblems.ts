@@ -2,11 +2,8 @@ import type { Calculator, CalculatorInput, Values } from '../calculators/calcula
 import { checkBounds, readInput } from '../calculators/readInputs'
 import { fieldUnit, runCalculator, showInput } from '../calculators/index'
 import type { CalculatorDefinition, ExerciseInput, UnitSystem } from '../contracts/exercises'
-import type { OwnSnapshot } from '../contracts/ownCalculators'
-import { checkOwnCalculator } from '../ownCalculators'
 import { parseQuantity } from '../units/parse'
 import { unitNames } from '../units/unit'
-import { calculatorOf } from './calculatorOf'
 import { toleranceOf } from './tolerance'
 import type { CalculatorExercise } from './calculatorExercise'
 import { drawInputs } from './drawInputs'
@@ -26,13 +23,13 @@ const mend = (path: string, message: string): ExerciseProblem => ({
   blocking: false,
 })
 
-/** What keeps a calculator exercise from being used, and what is worth mending. */
-export function findCalculatorProblems({ definition }: CalculatorExercise): ExerciseProblem[] {
-  const calculator = calculatorOf(definition)
+/** What keeps an exercise made of this calculator from being used, and what is worth mending. */
+export function findCalculatorProblems(
+  { definition }: CalculatorExercise,
+  calculator: Calculator | undefined,
+): ExerciseProblem[] {
   if (!calculator)
     return [block('definition.calculator', `There is no calculator “${definition.calculator}”.`)]
-  const wrong = definition.own ? findOwnProblems(definition.own) : []
-  if (wrong.length > 0) return wrong
   const inputs = calculator.inputs.flatMap((input) => {
     const given = definition.inputs[input.name]
     return given ? findInputProblems(input, given, `definition.inputs.${input.name}`) : []
@@ -41,12 +38,6 @@ export function findCalculatorProblems({ definition }: CalculatorExercise): Exer
   if ([...inputs, ...named].some(({ blocking }) => blocking)) return [...named, ...inputs]
   return [...named, ...inputs, ...findDrawProblems(calculator, definition)]
 }
-
-/** An own calculator with anything left to mend cannot be used at all. */
-const findOwnProblems = ({ definition }: OwnSnapshot): ExerciseProblem[] =>
-  checkOwnCalculator(definition).problems.map(({ path, message }) =>
-    block(`definition.own.definition.${path}`, `${definition.title}: ${message}`),
-  )
 
 function findNameProblems(calculator: Calculator, definition: CalculatorDefinition) {
   const problems: ExerciseProblem[] = []

@@ -1,12 +1,18 @@
 import type { Answer, Exercise, LearnerExercise, UnitSystem, Verdict } from '../contracts/exercises'
-import type { OwnCalculatorDefinition, OwnCalculatorSheet } from '../contracts/ownCalculators'
+import type {
+  OwnCalculatorDefinition,
+  OwnCalculatorSheet,
+  OwnSnapshot,
+} from '../contracts/ownCalculators'
+import { checkOwnCalculator } from '../ownCalculators'
+import { findBuiltInProblems, withPrompt } from './builtInProblems'
 import { calculatorOf, faceOf } from './calculatorOf'
 import { gradeCalculator, showCalculatorAnswer } from './calculatorExercise'
 import { findCalculatorProblems } from './calculatorProblems'
 import { drawInputs } from './drawInputs'
 import type { ExerciseProblem } from './grader'
 import { toLearnerQuestion } from './questions'
-import { findQuizProblems, gradeQuiz, showQuizAnswer } from './quizExercise'
+import { gradeQuiz, showQuizAnswer } from './quizExercise'
 import { unreadVerdict } from './verdict'
 
 export type { ExerciseProblem } from './grader'
@@ -93,13 +99,17 @@ export function shownAnswer(
 
 /** What keeps an exercise from being issued (`blocking`), and what is worth mending; `path` says where. */
 export function findExerciseProblems(exercise: Exercise): ExerciseProblem[] {
-  const found =
-    exercise.kind === 'quiz' ? findQuizProblems(exercise) : findCalculatorProblems(exercise)
-  if (exercise.prompt.trim() !== '') return found
-  const empty = {
-    path: 'prompt',
-    message: 'Nothing is asked: the prompt is empty.',
-    blocking: true,
-  }
-  return [empty, ...found]
+  if (exercise.kind === 'quiz' || !exercise.definition.own) return findBuiltInProblems(exercise)
+  const calculator = calculatorOf(exercise.definition)
+  const wrong = calculator ? findOwnProblems(exercise.definition.own) : []
+  const found = wrong.length > 0 ? wrong : findCalculatorProblems(exercise, calculator)
+  return withPrompt(exercise, found)
 }
+
+/** An own calculator with anything left to mend cannot be used at all. */
+const findOwnProblems = ({ definition }: OwnSnapshot): ExerciseProblem[] =>
+  checkOwnCalculator(definition).problems.map(({ path, message }) => ({
+    path: `definition.own.definition.${path}`,
+    message: `${definition.title}: ${message}`,
+    blocking: true,
+  }))

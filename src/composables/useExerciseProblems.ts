@@ -1,6 +1,7 @@
 import { computed, onScopeDispose, shallowRef, watchEffect } from 'vue'
 import type { Exercise } from '../../shared/contracts/exercises'
-import { findExerciseProblems, type ExerciseProblem } from '../../shared/grading'
+import { findBuiltInProblems } from '../../shared/grading/builtInProblems'
+import type { ExerciseProblem } from '../../shared/grading/grader'
 import { judgeAside } from './ownCalculatorAside'
 
 /** Typing pauses this long before an exercise made of an own calculator is tried out. */
@@ -40,6 +41,6 @@ export function useExerciseProblems(exercise: () => Exercise | null) {
   return computed(() => {
     const one = exercise()
     if (!one) return []
-    return isOwn(one) ? foundAside.value : findExerciseProblems(one)
+    return isOwn(one) ? foundAside.value : findBuiltInProblems(one)
   })
 }
