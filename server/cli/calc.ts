@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs'
 import { fileURLToPath } from 'node:url'
 import { checkCases } from './calcCases'
+import { computeCutList, cutListDescription } from './calcCutList'
 import { computeJson, describeCalculator, failure } from './calcJson'
 import { calculators } from '../../shared/calculators/index'
 
@@ -24,7 +25,9 @@ export function runCalc(
 ): CommandResult {
   const [command, argument] = words
   if (command === undefined) return answer(failure('id', USAGE), 1)
-  if (command === 'list') return answer(calculators.map(describeCalculator))
+  if (command === 'list') {
+    return answer([...calculators.map(describeCalculator), cutListDescription])
+  }
   if (command !== 'check') {
     const result = computeJson(command, argument ?? '{}')
     return answer(result, 'error' in result ? 1 : 0)
@@ -38,8 +41,18 @@ export function runCalc(
   }
 }
 
+/** Runs `cutlist JSON`, which searches and so takes its time. */
+export async function runCalcCutList(json = '{}'): Promise<CommandResult> {
+  const result = await computeCutList(json)
+  return answer(result, 'error' in result ? 1 : 0)
+}
+
 if (process.argv[1] === fileURLToPath(import.meta.url)) {
-  const { text, exitCode } = runCalc(process.argv.slice(2), (path) => readFileSync(path, 'utf8'))
+  const words = process.argv.slice(2)
+  const { text, exitCode } =
+    words[0] === 'cutlist'
+      ? await runCalcCutList(words[1])
+      : runCalc(words, (path) => readFileSync(path, 'utf8'))
   process.stdout.write(`${text}\n`)
   process.exitCode = exitCode
 }

@@ -114,7 +114,7 @@ describe('calc list', () => {
       inputs: { name: string }[]
       outputs: { name: string }[]
     }[]
-    expect(listed.map(({ id }) => id)).toEqual(calculators.map(({ id }) => id))
+    expect(listed.map(({ id }) => id)).toEqual([...calculators.map(({ id }) => id), 'cutlist'])
     const pitch = listed.find(({ id }) => id === 'pitch')
     expect(pitch?.inputs.find(({ name }) => name === 'degrees')).toMatchObject({
       unit: 'deg',
