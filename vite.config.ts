@@ -53,7 +53,7 @@ const sharedChunks = [
   {
     name: 'vendor',
     priority: 3,
-    test: /node_modules\/(vue|@vue|vue-router|pinia|@vueuse|zod)\//,
+    test: /node_modules\/(vue|@vue|vue-router|pinia|@vueuse|zod)\/|vite\/preload-helper/,
   },
   {
     name: 'sheets',

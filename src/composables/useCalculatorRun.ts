@@ -1,13 +1,13 @@
 import { computed, onScopeDispose, ref, shallowRef, watchEffect } from 'vue'
-import { findCalculator } from '../../shared/calculators'
 import { runCalculator, type CalculatorRun } from '../../shared/calculators/runCalculator'
 import type { UnitSystem } from '../../shared/contracts/exercises'
 import { OWN_PREFIX, type LearnerOwnSnapshot } from '../../shared/contracts/ownCalculators'
 import { describeOwnCalculator, type CalculatorFace } from '../../shared/ownCalculators/face'
 import { endedRun, tookTooLong } from '../../shared/ownCalculators/ended'
+import { fetchedCalculator } from './fetchedCalculators'
 import { performAside } from './ownCalculatorAside'
 
-/** A built-in calculator by its id, or an own one with what an exercise or the bench holds of it. */
+/** A built-in calculator by its id, fetched before, or an own one with what an exercise or the bench holds of it. */
 export interface WhichCalculator {
   calculator: string
   own?: LearnerOwnSnapshot | undefined
@@ -15,7 +15,7 @@ export interface WhichCalculator {
 
 /** The words and fields of a calculator; undefined where there is none. */
 export function findFace({ calculator: id, own }: WhichCalculator): CalculatorFace | undefined {
-  if (!own) return findCalculator(id)
+  if (!own) return fetchedCalculator(id)
   return id === `${OWN_PREFIX}${own.key}` ? describeOwnCalculator(own.definition, own) : undefined
 }
 
@@ -32,7 +32,7 @@ export function useCalculatorRun(
   const face = computed(() => findFace(which()))
   const builtInRun = computed(() => {
     const { calculator: id, own } = which()
-    const calculator = own ? undefined : findCalculator(id)
+    const calculator = own ? undefined : fetchedCalculator(id)
     return calculator ? runCalculator(calculator, texts(), system()) : null
   })
   const ownRun = shallowRef<CalculatorRun | null>(null)

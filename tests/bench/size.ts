@@ -1,6 +1,8 @@
+import { statSync } from 'node:fs'
 import { readFile } from 'node:fs/promises'
-import { join } from 'node:path'
+import { basename, join } from 'node:path'
 import { gzipSync } from 'node:zlib'
+import { calculators } from '../../shared/calculators/index'
 import { buildWhenChanged } from '../../server/cli/build'
 
 /** One entry of Vite's manifest. */
@@ -42,11 +44,32 @@ function chunksOf(manifest: Manifest, names: readonly string[]): Map<string, Chu
   return found
 }
 
-/** The same with what these fetch later of themselves: drawings, the player, kinds of exercises. */
+/** Each calculator and its drawing come alone, when a stop first shows them; a lesson has a handful of stops. */
+const stopsOfLesson = 3
+const calculatorNames = calculators.map(({ id }) =>
+  id.replace(/-(\w)/g, (_, letter: string) => letter.toUpperCase()),
+)
+const comeAlone = [calculatorNames, calculatorNames.map((name) => `${name}Sheet`)]
+/** The name a chunk was given from what it holds: `slab` of assets/slab-iCGFvnNf.js. */
+const nameOf = ({ file }: Chunk) => basename(file).replace(/-[\w-]{8}\.js$/, '')
+
+/** The same with what these fetch later of themselves: the player, kinds of exercises, the largest few calculators. */
 function chunksWithLater(manifest: Manifest, names: readonly string[], but: Set<string>) {
   const own = [...chunksOf(manifest, names)].filter(([name]) => !but.has(name))
   const later = own.flatMap(([, chunk]) => chunk.dynamicImports ?? [])
-  return chunksOf(manifest, [...names, ...later])
+  const bytesOf = (name: string) => statSync(join(folder, manifest[name]?.file ?? '')).size
+  const isOf = (names: readonly string[]) => (name: string) => {
+    const chunk = manifest[name]
+    return chunk !== undefined && names.includes(nameOf(chunk))
+  }
+  const largest = comeAlone.flatMap((names) =>
+    later
+      .filter(isOf(names))
+      .sort((one, other) => bytesOf(other) - bytesOf(one))
+      .slice(0, stopsOfLesson),
+  )
+  const always = later.filter((name) => !comeAlone.some((names) => isOf(names)(name)))
+  return chunksOf(manifest, [...names, ...always, ...largest])
 }
 
 const filesOf = (chunks: Map<string, Chunk>) =>

@@ -12,6 +12,8 @@ beforeEach(async () => {
   vi.stubGlobal('Worker', FakeWorker)
   vi.resetModules()
   ;({ useCalculatorRun } = await import('../../../src/composables/useCalculatorRun'))
+  const { fetchCalculator } = await import('../../../src/composables/fetchedCalculators')
+  for (const id of ['slab', 'square', 'no-such']) await fetchCalculator(id)
 })
 
 const slabTexts = { length: '2.6 m', width: '1.1 m', thickness: '100 mm' }
