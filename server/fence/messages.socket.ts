@@ -46,6 +46,8 @@ async function readReader(socket: Socket): Promise<Reader> {
   return reader
 }
 
+const tooOften = () => new AppError(429, 'too-often', 'Too many messages. Wait a moment.')
+
 function refusalOf(error: unknown): { code: string; detail: string } {
   if (error instanceof AppError) return { code: error.code, detail: error.message }
   if (error instanceof z.ZodError) {
@@ -57,9 +59,13 @@ function refusalOf(error: unknown): { code: string; detail: string } {
   return { code: 'unexpected', detail: 'Something went wrong here. Try again.' }
 }
 
-/** Returns `on(name, contract, work)`, which answers one kind of message of a line. */
+/**
+ * Returns `on(name, contract, work)`, which answers one kind of message of a line. A line's messages are worked one
+ * after the other: a room that is left and joined again in one breath must not be left last.
+ */
 export function answerMessages(socket: Socket) {
   const isSlowEnough = createMeter()
+  let last: Promise<unknown> = Promise.resolve()
 
   async function answer<S extends z.ZodType, T>(
     schema: S,
@@ -67,7 +73,6 @@ export function answerMessages(socket: Socket) {
     work: (payload: z.output<S>, reader: Reader) => Promise<T>,
   ): Promise<Acknowledgement<T>> {
     try {
-      if (!isSlowEnough()) throw new AppError(429, 'too-often', 'Too many messages. Wait a moment.')
       const parsed = schema.parse(payload)
       return { ok: true, data: await work(parsed, await readReader(socket)) }
     } catch (error) {
@@ -81,9 +86,11 @@ export function answerMessages(socket: Socket) {
     work: (payload: z.output<S>, reader: Reader) => Promise<T>,
   ) {
     socket.on(name, (payload: unknown, acknowledge: unknown) => {
-      void answer(schema, payload, work).then((reply) => {
+      const tell = (reply: unknown) => {
         if (typeof acknowledge === 'function') (acknowledge as (reply: unknown) => void)(reply)
-      })
+      }
+      if (isSlowEnough()) last = last.then(() => answer(schema, payload, work)).then(tell)
+      else tell({ ok: false, error: refusalOf(tooOften()) })
     })
   }
 }
