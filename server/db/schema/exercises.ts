@@ -12,7 +12,12 @@ import {
   unique,
   varchar,
 } from 'drizzle-orm/mysql-core'
-import type { Answer, CalculatorDefinition, QuizQuestion, Verdict } from '../../../shared/contracts/exercises'
+import type {
+  Answer,
+  CalculatorDefinition,
+  QuizQuestion,
+  Verdict,
+} from '../../../shared/contracts/exercises'
 import type { OwnCalculatorDefinition } from '../../../shared/contracts/ownCalculators'
 import { users } from './accounts'
 import { createdAt, id, moment, reference, stableKey } from './columns'
@@ -99,7 +104,9 @@ export const ownCalculators = mysqlTable(
     /** The newest version that was kept, or null. */
     attachable: int('attachable', { unsigned: true }),
     version: int('version', { unsigned: true }).notNull().default(1),
-    savedAt: moment('saved_at').notNull().default(sql`CURRENT_TIMESTAMP(3)`),
+    savedAt: moment('saved_at')
+      .notNull()
+      .default(sql`CURRENT_TIMESTAMP(3)`),
     createdAt: createdAt(),
   },
   (t) => [unique('own_calculators_key').on(t.courseId, t.key)],
