@@ -63,6 +63,7 @@ export async function describeBenchCourse(courseId: number, actor: Actor): Promi
     can: {
       edit: !isIssued && can(actor, 'course:edit', thing),
       issue: !isIssued && can(actor, 'course:issue', thing),
+      writeCalculators: can(actor, 'course:edit', thing),
     },
   }
 }

@@ -57,5 +57,4 @@ export const findCalculator = (id: string): Calculator | undefined =>
   calculators.find((calculator) => calculator.id === id)
 
 export { convertText, fieldUnit, showInput, showOutput } from './fields'
-export { readInputs, type InputErrors } from './readInputs'
 export { hideAnswer, runCalculator, type CalculatorRun } from './runCalculator'

@@ -67,7 +67,8 @@ export const benchCourseSchema = z.object({
   stages: z.array(benchStageSchema),
   snags: z.array(snagSchema),
   staff: z.array(z.object({ name: z.string(), role: z.enum(['owner', 'helper']) })),
-  can: z.object({ edit: z.boolean(), issue: z.boolean() }),
+  /** Own calculators are written for the next revision too, while nothing else of an issued one is. */
+  can: z.object({ edit: z.boolean(), issue: z.boolean(), writeCalculators: z.boolean() }),
 })
 export type BenchCourse = z.infer<typeof benchCourseSchema>
 /** The outline after a stage or lesson was added to it, with the new row's id. */

@@ -52,7 +52,7 @@ describe('POST bench/courses', () => {
       revision: 'draft',
       version: 1,
       isIssued: false,
-      can: { edit: true, issue: true },
+      can: { edit: true, issue: true, writeCalculators: true },
       staff: [{ role: 'owner' }],
     })
     expect(first.stages.map(({ kind, title }) => [kind, title])).toEqual([
@@ -146,7 +146,7 @@ describe('bench/courses/:courseId', () => {
     await addHelper(course.id, helper.id)
     benchCourseSchema.parse((await agent.get(path).expect(200)).body)
     const seen = await (await app.asUser(helper)).get(path).expect(200)
-    expect(seen.body.can).toEqual({ edit: false, issue: false })
+    expect(seen.body.can).toEqual({ edit: false, issue: false, writeCalculators: false })
     await app.asVisitor().get(path).expect(401)
     await (await app.asUser(await createInstructor())).get(path).expect(403)
     await agent.get('/api/bench/courses/999999').expect(404)

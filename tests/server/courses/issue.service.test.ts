@@ -34,7 +34,7 @@ describe('POST bench/courses/:courseId/issue', () => {
       revision: 'A',
       isIssued: true,
       changeNote: 'The first.',
-      can: { edit: false, issue: false },
+      can: { edit: false, issue: false, writeCalculators: true },
     })
     const [row] = await db
       .select()
