@@ -159,7 +159,7 @@ function drawTape(drawing: Drawing, { at, a, b }: Place, text: string): void {
   const [dx, dy] = [b[0] - a[0], b[1] - a[1]]
   const length = Math.hypot(dx, dy)
   const depth = Math.abs(dx * (at[1] - a[1]) - dy * (at[0] - a[0])) / length
-  const off = Math.min(28, Math.max(0, 50 - depth))
+  const off = Math.min(40, Math.max(0, 64 - depth))
   const degrees = (Math.atan2(dy, dx) * 180) / Math.PI
   const px = (a[0] + b[0]) / 2 - (dy / length) * off
   const py = (a[1] + b[1]) / 2 + (dx / length) * off
