@@ -11,6 +11,7 @@ import {
   readTable,
 } from './batchTables'
 import { numberOf, wordOf } from './values'
+import { wasteInput } from './concreteInputs'
 
 const looseUnit = { metric: 'L', imperial: 'ft³' }
 
@@ -91,15 +92,7 @@ export const batch: Calculator = {
         { value: 'yes', label: 'yes' },
       ],
     },
-    {
-      name: 'waste',
-      label: 'Waste',
-      quantity: 'percent',
-      assumed: true,
-      initial: { metric: '10', imperial: '10' },
-      min: 0,
-      max: 50,
-    },
+    wasteInput(),
   ],
   outputs: [
     { name: 'cement', label: 'Cement', quantity: 'mass' },

@@ -1,10 +1,11 @@
 import type { Calculator, Values } from './calculator'
 import { CalculatorInputError } from './calculator'
-import { bagChoices, bagSources, findBag } from './bags'
+import { bagSources, findBag } from './bags'
 import { mixSlips } from './mixSlips'
 import { mixSteps } from './mixSteps'
 import { CEMENT_SHARE, classifySlump, judgeMix, slumpClasses } from './slump'
 import { numberOf, optionalNumber, wordOf } from './values'
+import { bagInput } from './concreteInputs'
 
 const waterUnit = { metric: 'L', imperial: 'qt' }
 /** Kilograms of water in a cubic metre. */
@@ -48,13 +49,7 @@ export const mix: Calculator = {
   question: 'Is it too stiff, right or too wet?',
   help: 'Water makes a mix easy to work and the concrete weak. A splash too much in every bag costs strength, and the top dusts and cracks. Measure the water, look at how the heap slumps, and stop at what the bag says.',
   inputs: [
-    {
-      name: 'bag',
-      label: 'Bag',
-      quantity: 'choice',
-      initial: { metric: '25 kg', imperial: '80 lb' },
-      choices: bagChoices,
-    },
+    bagInput,
     {
       ...water(
         'waterAdded',

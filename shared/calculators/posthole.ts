@@ -1,13 +1,14 @@
 import type { Calculator, Values } from './calculator'
 import { CalculatorInputError } from './calculator'
 import type { UnitSystem } from '../contracts/exercises'
-import { bagChoices, findBag } from './bags'
+import { findBag } from './bags'
 import { postholeCautions, postholeSources } from './postholeSources'
 import { postholeSlips } from './postholeSlips'
 import { postholeSteps } from './postholeSteps'
 import { numberOf, optionalNumber, wordOf } from './values'
 import { formatQuantity } from '../units/format'
 import { roundUp } from '../units/number'
+import { bagInput, bagYieldInput, wasteInput } from './concreteInputs'
 
 const volumeUnit = { metric: 'L', imperial: 'ft³' }
 
@@ -82,34 +83,9 @@ export const posthole: Calculator = {
       initial: { metric: '90', imperial: '3-1/2"' },
     },
     { ...section('postDepth', 'Post, thick'), initial: { metric: '90', imperial: '3-1/2"' } },
-    {
-      name: 'waste',
-      label: 'Waste',
-      quantity: 'percent',
-      help: 'No hole is as round as the sum.',
-      assumed: true,
-      initial: { metric: '10', imperial: '10' },
-      min: 0,
-      max: 50,
-    },
-    {
-      name: 'bag',
-      label: 'Bag',
-      quantity: 'choice',
-      initial: { metric: '25 kg', imperial: '80 lb' },
-      choices: bagChoices,
-    },
-    {
-      name: 'bagYield',
-      label: 'One bag makes',
-      quantity: 'volume',
-      help: 'What your own bag says; it overrides the figure here.',
-      optional: true,
-      unit: volumeUnit,
-      initial: { metric: '', imperial: '' },
-      min: 0.001,
-      max: 0.05,
-    },
+    wasteInput('No hole is as round as the sum.'),
+    bagInput,
+    bagYieldInput,
   ],
   outputs: [
     { name: 'bags', label: 'Bags', quantity: 'count' },

@@ -1,10 +1,11 @@
 import type { Calculator, Values } from './calculator'
 import { CalculatorInputError } from './calculator'
-import { bagChoices, bagSources, findBag } from './bags'
+import { bagSources, findBag } from './bags'
 import { slabSlips } from './slabSlips'
 import { slabSteps } from './slabSteps'
 import { numberOf, optionalNumber, wordOf } from './values'
 import { roundUp, roundUpTo } from '../units/number'
+import { bagInput, bagYieldInput, wasteInput } from './concreteInputs'
 
 const YARD3 = 0.9144 ** 3
 const volumeUnit = { metric: 'm³', imperial: 'yd³' }
@@ -99,34 +100,9 @@ export const slab: Calculator = {
         { value: 'yes', label: 'is level' },
       ],
     },
-    {
-      name: 'waste',
-      label: 'Waste',
-      quantity: 'percent',
-      help: 'What the ground, the barrow and the form keep.',
-      assumed: true,
-      initial: { metric: '10', imperial: '10' },
-      min: 0,
-      max: 50,
-    },
-    {
-      name: 'bag',
-      label: 'Bag',
-      quantity: 'choice',
-      initial: { metric: '25 kg', imperial: '80 lb' },
-      choices: bagChoices,
-    },
-    {
-      name: 'bagYield',
-      label: 'One bag makes',
-      quantity: 'volume',
-      help: 'What your own bag says; it overrides the figure here.',
-      optional: true,
-      unit: { metric: 'L', imperial: 'ft³' },
-      initial: { metric: '', imperial: '' },
-      min: 0.001,
-      max: 0.05,
-    },
+    wasteInput('What the ground, the barrow and the form keep.'),
+    bagInput,
+    bagYieldInput,
   ],
   outputs: [
     { name: 'bags', label: 'Bags', quantity: 'count' },
