@@ -12,8 +12,12 @@ async function keepFocus(move: () => void) {
   target?.focus()
 }
 
-/** Keys for rows that have none of their own, so that a row that is moved or renamed stays the same on the page. */
-export function useMovedRows(count: () => number) {
+/**
+ * Rows that are moved and taken out by buttons, with keys for rows that have none of their own, so that one that is
+ * moved or renamed stays the same on the page; `said` tells what happened to those who listen.
+ */
+export function useMovedRows<T>(rows: () => readonly T[], setAll: (rows: T[]) => void) {
+  const count = () => rows().length
   let next = 0
   const keys = ref<number[]>([])
   const said = ref('')
@@ -24,19 +28,20 @@ export function useMovedRows(count: () => number) {
   }
   watch(count, fit, { immediate: true, flush: 'sync' })
 
-  function move(index: number, by: -1 | 1, apply: () => void) {
+  function shift(index: number, by: -1 | 1) {
     const place = index + by
     if (place < 0 || place >= count()) return
     void keepFocus(() => {
       keys.value = moveRow(keys.value, index, by)
-      apply()
+      setAll(moveRow(rows(), index, by))
     })
     said.value = `Now ${place + 1} of ${count()}.`
   }
-  function takeOut(index: number, apply: () => void) {
+  /** `takeOut` does it where more than the row goes with it. */
+  function drop(index: number, takeOut = () => setAll(rows().toSpliced(index, 1))) {
     keys.value = keys.value.toSpliced(index, 1)
-    apply()
+    takeOut()
     said.value = `Taken out; ${count()} left.`
   }
-  return { keys, said, move, takeOut }
+  return { keys, said, shift, drop }
 }

@@ -5,15 +5,18 @@ import { useMovedRows } from '../../../src/composables/useMovedRows'
 describe('useMovedRows', () => {
   it('gives each row a key that goes with it', () => {
     const rows = ref(['a', 'b', 'c'])
-    const { keys, said, move, takeOut } = useMovedRows(() => rows.value.length)
+    const setAll = (next: string[]) => (rows.value = next)
+    const { keys, said, shift, drop } = useMovedRows(() => rows.value, setAll)
     const before = [...keys.value]
     expect(new Set(before).size).toBe(3)
 
-    move(2, -1, () => (rows.value = ['a', 'c', 'b']))
+    shift(2, -1)
+    expect(rows.value).toEqual(['a', 'c', 'b'])
     expect(keys.value).toEqual([before[0], before[2], before[1]])
     expect(said.value).toBe('Now 2 of 3.')
 
-    takeOut(0, () => (rows.value = ['c', 'b']))
+    drop(0)
+    expect(rows.value).toEqual(['c', 'b'])
     expect(keys.value).toEqual([before[2], before[1]])
     expect(said.value).toBe('Taken out; 2 left.')
 
@@ -23,11 +26,14 @@ describe('useMovedRows', () => {
   })
 
   it('leaves the ends where they are', () => {
-    const { keys, move } = useMovedRows(() => 2)
-    const before = [...keys.value]
     let moved = 0
-    move(0, -1, () => moved++)
-    move(1, 1, () => moved++)
+    const { keys, shift } = useMovedRows(
+      () => ['a', 'b'],
+      () => moved++,
+    )
+    const before = [...keys.value]
+    shift(0, -1)
+    shift(1, 1)
     expect(moved).toBe(0)
     expect(keys.value).toEqual(before)
   })
@@ -38,11 +44,14 @@ describe('useMovedRows', () => {
     parent.append(up, down)
     document.body.append(parent)
     up.focus()
-    const { move } = useMovedRows(() => 2)
-    move(1, -1, () => {
-      up.disabled = true
-      up.blur()
-    })
+    const { shift } = useMovedRows(
+      () => ['a', 'b'],
+      () => {
+        up.disabled = true
+        up.blur()
+      },
+    )
+    shift(1, -1)
     await Promise.resolve()
     await Promise.resolve()
     expect(document.activeElement).toBe(down)
